@@ -1,0 +1,14 @@
+#pragma once
+
+#include "gainsay/core/expression.h"
+
+#include <string_view>
+
+namespace gainsay::core {
+
+/// The exact derivative by one symbol, simplified. Piecewise functions (abs, min, max, if,
+/// comparisons) are derived branch by branch; at a switch the derivative is that of the branch
+/// taken.
+Expression derivative(const Expression& expression, std::string_view symbol);
+
+}  // namespace gainsay::core

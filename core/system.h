@@ -1,0 +1,40 @@
+#pragma once
+
+#include "gainsay/core/expression.h"
+#include "gainsay/core/hypothesis.h"
+
+#include <cstddef>
+#include <map>
+#include <string>
+#include <utility>
+#include <vector>
+
+namespace gainsay::core {
+
+/// An instantaneous rise of one state by an expression of unknowns and inputs (a dose; an amount
+/// added is divided by the volume beforehand where the state is a concentration).
+struct Jump {
+  std::size_t state = 0;
+  Expression rise;
+};
+
+/// One hypothesis in one experiment, reduced to what is computed:
+///   dy/dt = rates(t, y, p, u),   y(begins) = starts(p, u),   shown = readouts(t, y, p, u).
+/// All expressions are in states, unknowns, inputs and t alone (knowns are numbers by now).
+struct System {
+  std::vector<std::string> states;    ///< n names
+  std::vector<std::string> unknowns;  ///< p names: those that this system depends on
+  std::vector<std::string> inputs;    ///< names of piecewise constant inputs
+  std::vector<Expression> rates;      ///< n
+  std::vector<Expression> starts;     ///< n
+  std::vector<Jump> jumps;
+  std::vector<Expression> readouts;  ///< m
+};
+
+/// dx/dt of every species from stoichiometry, volumes and rates, as written by the author where
+/// possible (species, unknowns, knowns, inputs, t; compartments, reactions and definitions written
+/// out). Methods (1)-(3). Concentrations: (1/volume) sum nu flow; `rate` of reactions within one
+/// compartment: sum nu rate.
+std::vector<Expression> balance(const Hypothesis& hypothesis);
+
+}  // namespace gainsay::core

@@ -1,0 +1,7 @@
+#include "gainsay/core/version.h"
+
+namespace gainsay::core {
+
+const char* version() { return GAINSAY_VERSION; }
+
+}  // namespace gainsay::core

@@ -1,0 +1,71 @@
+#pragma once
+
+#include "gainsay/core/integrator.h"
+#include "gainsay/core/result.h"
+#include "gainsay/estimation/problem.h"
+
+#include <Eigen/Core>
+
+#include <limits>
+#include <memory>
+#include <optional>
+#include <string>
+#include <vector>
+
+namespace gainsay::estimation {
+
+/// What one evaluation of all experiments gives. r and J are weighted; J = dr/dx in search
+/// coordinates (coordinates.h). With model-dependent sd, r = (shown - observed) / sd(shown) and J =
+/// (dshown/dx) / sd with sd held. With unknown noise, r = shown - observed is in units of the
+/// readout and sds are estimated from it.
+struct Evaluation {
+  Eigen::VectorXd r;       ///< N: data (shown - observed) / sd, then priors
+  Eigen::MatrixXd J;       ///< N x k unknowns, or empty
+  Eigen::VectorXd shown;   ///< modelled values of the data (without priors)
+  Eigen::VectorXd sd;      ///< of each datum, as used; 1 where unknown
+  Eigen::MatrixXd dshown;  ///< d shown / dx, or empty
+  double V = std::numeric_limits<double>::quiet_NaN();  ///< sum of r^2 (unknown noise: of (r /
+                                                        ///< estimated sd)^2)
+  double objective =
+      std::numeric_limits<double>::quiet_NaN();  ///< -2 ln L up to a constant: what a fit lowers
+};
+
+/// Which experiment could not be integrated, and why.
+struct EvaluationFailure {
+  std::string experiment;
+  core::IntegrationFailure integration;
+};
+
+/// The changed data of the stages of a descent.
+struct Stage {
+  double horizon = 1.0;   ///< share of each experiment's own last time up to which data count
+  bool tempered = false;  ///< sd^2 + (0.1 max|z|)^2, z the values of one readout in one experiment
+  bool pulled =
+      false;  ///< weak residuals (x - centre) / (high - low) in coordinates, one for each unknown
+};
+
+/// Evaluates one problem; owns an integrator for each experiment; one for each worker.
+class Evaluator {
+ public:
+  explicit Evaluator(const Problem& problem);  ///< `problem` must outlive it
+  ~Evaluator();
+  Evaluator(Evaluator&&) noexcept;
+
+  enum class Want { Residuals, ResidualsAndJacobian };
+  /// Residuals alone stop early (with nullopt in the value) once the partial objective exceeds
+  /// `give_up_above`.
+  core::Result<std::optional<Evaluation>, EvaluationFailure> evaluate(
+      const Eigen::VectorXd& x, Want want, const Stage& stage = {},
+      double give_up_above = std::numeric_limits<double>::infinity());
+
+  const Problem& problem() const;
+  long integrations() const;  ///< of one experiment each, since made
+  void set_relative_accuracy(double relative, double absolute_factor = 1.0);
+  void set_engine(core::Engine engine);
+
+ private:
+  struct Content;
+  std::unique_ptr<Content> content_;
+};
+
+}  // namespace gainsay::estimation
