@@ -5,6 +5,7 @@
 #include <Eigen/Core>
 
 #include <cstddef>
+#include <span>
 #include <string>
 #include <vector>
 
@@ -53,9 +54,9 @@ Network derive_network(const Hypothesis& hypothesis);
 std::vector<Warning> warnings(const Hypothesis& hypothesis, const Network& network,
                               const std::vector<std::string>& used_elsewhere);
 
-/// Whether two hypotheses are the same system of equations: equal derivatives (tested at keyed
-/// random points, in the sense of polynomial identity testing: Schwartz 1980) for species of the
-/// same names, unknowns of the same names.
-bool same_system(const Hypothesis& a, const Hypothesis& b);
+/// Whether two hypotheses are the same system of equations: equal derivatives, starts and values of
+/// `shown` (what readouts show) for species of the same names, unknowns of the same names. Tested
+/// at keyed random points in 50 digits, in the sense of identity testing: Schwartz (1980).
+bool same_system(const Hypothesis& a, const Hypothesis& b, std::span<const Expression> shown = {});
 
 }  // namespace gainsay::core

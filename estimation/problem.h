@@ -46,7 +46,7 @@ struct LinearUnknowns {
 
 struct FittedExperiment {
   std::string name;
-  std::unique_ptr<const core::Program> program;
+  std::shared_ptr<const core::Program> program;  ///< immutable, shared by copies of the problem
   core::Schedule schedule;
   std::vector<double> absolute;  ///< tolerance of each state
   std::vector<std::size_t>
@@ -63,6 +63,7 @@ struct Problem {
   std::vector<std::string>
       unused;  ///< declared by the hypothesis itself, but nothing depends on them
   std::vector<FittedExperiment> experiments;
+  std::vector<std::string> readouts;      ///< names of all readouts, in the order given
   std::vector<std::string> noise_groups;  ///< readouts whose constant sd is unknown, by name
   double relative_accuracy = 1e-6;
   std::size_t residuals() const;  ///< N, priors included
@@ -75,6 +76,10 @@ struct AssemblyOptions {
   double relative_accuracy = 1e-6;
   double negligible =
       1e-8;  ///< of a species: times the largest start, addition or reading of its kind (1 if none)
+  /// Keeps experiments without a fitted point and gives every program all readouts, in the order
+  /// given: for simulating. Else each program shows the readouts that have data in it, and
+  /// experiments without data are left out.
+  bool to_simulate = false;
 };
 
 /// Puts a hypothesis and the experiments together. `declared` holds the study's and the hypothesis'
@@ -89,7 +94,7 @@ core::Result<Problem> assemble(const core::Hypothesis& hypothesis,
                                std::span<const Experiment> experiments,
                                const AssemblyOptions& options);
 
-/// The same problem with `low`/`high` of one unknown replaced (a bound moved out), sharing nothing.
+/// The same problem with `low`/`high` of one unknown replaced (a bound moved out).
 Problem with_range(const Problem& problem, std::size_t unknown, double low, double high);
 
 }  // namespace gainsay::estimation

@@ -35,6 +35,8 @@ struct Unknown {
 struct DeclaredUnknown {
   Unknown unknown;
   bool per_experiment = false;
+  bool own =
+      false;  ///< by the hypothesis itself, not by the study: a warning where nothing uses it
 };
 
 }  // namespace gainsay::estimation
