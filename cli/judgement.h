@@ -1,6 +1,7 @@
 #pragma once
 
 #include "gainsay/cli/study.h"
+#include "gainsay/core/network.h"
 #include "gainsay/estimation/curves.h"
 #include "gainsay/estimation/problem.h"
 #include "gainsay/stats/verdict.h"
@@ -17,6 +18,7 @@ struct Outcome {
   std::size_t hypothesis = 0;  ///< number in Study::hypotheses
   std::shared_ptr<const estimation::Problem> problem;
   stats::Judged judged;
+  core::Network network;                  ///< of its mechanism: for the graph
   std::vector<estimation::Curve> curves;  ///< of the best fit; empty where it cannot be integrated
   double weight = stats::kNotComputed;    ///< among those not rejected
 };
