@@ -1,0 +1,35 @@
+# find_package(gainsay COMPONENTS core estimation stats) gives gainsay::core, gainsay::estimation
+# and gainsay::stats; without components, all three. A layer brings those below it.
+include(CMakeFindDependencyMacro)
+
+set(gainsay_wanted ${gainsay_FIND_COMPONENTS})
+if(NOT gainsay_wanted)
+  set(gainsay_wanted core estimation stats)
+endif()
+foreach(component IN LISTS gainsay_wanted)
+  if(NOT component MATCHES "^(core|estimation|stats)$")
+    set(gainsay_FOUND FALSE)
+    set(gainsay_NOT_FOUND_MESSAGE "gainsay has no component '${component}': there are core, estimation, stats")
+    return()
+  endif()
+endforeach()
+
+find_dependency(Eigen3 3.4 NO_MODULE)
+find_dependency(fmt 9)
+find_dependency(SUNDIALS 6.4 COMPONENTS cvodes nvecserial sunmatrixdense sunlinsoldense)
+include(${CMAKE_CURRENT_LIST_DIR}/core.cmake)
+set(gainsay_core_FOUND TRUE)
+
+if("estimation" IN_LIST gainsay_wanted OR "stats" IN_LIST gainsay_wanted)
+  find_dependency(Ceres 2.1)
+  find_dependency(Threads)
+  include(${CMAKE_CURRENT_LIST_DIR}/estimation.cmake)
+  set(gainsay_estimation_FOUND TRUE)
+endif()
+
+if("stats" IN_LIST gainsay_wanted)
+  find_dependency(Boost 1.74)
+  include(${CMAKE_CURRENT_LIST_DIR}/stats.cmake)
+  set(gainsay_stats_FOUND TRUE)
+endif()
+unset(gainsay_wanted)
