@@ -46,6 +46,9 @@ enum class Operation : std::uint8_t {
   If    // [3] condition, value where true, value where false
 };
 
+/// How many operands it takes: the counts in brackets above.
+std::size_t operand_count(Operation operation);
+
 /// An immutable expression; a cheap handle to a shared node. Keeps the form in which it was written
 /// (no hidden simplification), so that it can be shown to its author as such.
 class Expression {
@@ -79,6 +82,9 @@ Expression operator-(const Expression& a, const Expression& b);
 Expression operator*(const Expression& a, const Expression& b);
 Expression operator/(const Expression& a, const Expression& b);
 Expression pow(const Expression& base, const Expression& exponent);
+
+/// The node with other operands; the node itself where they are the same, so that sharing is kept.
+Expression with_operands(const Expression& node, std::vector<Expression> operands);
 
 /// Each symbol found in `replacements` replaced by its expression (once: replacements are not
 /// searched again).

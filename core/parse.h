@@ -2,6 +2,7 @@
 
 #include "gainsay/core/expression.h"
 #include "gainsay/core/result.h"
+#include "gainsay/core/tokens.h"
 
 #include <optional>
 #include <string>
@@ -37,8 +38,5 @@ Result<Parsed> parse(std::string_view text, const ParseContext& context = {});
 
 /// True for functions, constants, `t` and rate laws: what a user's name must not be.
 bool is_reserved(std::string_view name);
-
-/// True for a letter followed by letters, digits and `_`.
-bool is_name(std::string_view text);
 
 }  // namespace gainsay::core

@@ -19,13 +19,16 @@ struct RateLaw {
   std::string formula;                 ///< in the arguments, as a user would write it
   std::string source;                  ///< publication
   std::string limits;                  ///< where it holds
+  /// The law is multiplied by the equation's own side (mass_action): `formula` then only shows it.
+  bool takes_side = false;
 };
 
 /// The table that the parser, `gainsay laws` and docs/rate-laws.md are made from.
 std::span<const RateLaw> all_rate_laws();
 const RateLaw* find_rate_law(std::string_view name);
 
-/// The law's formula with these arguments in place; requires the right count.
+/// The law's formula with these arguments in place; requires the right count, and a law that does
+/// not take the equation's side.
 Expression write_out(const RateLaw& law, const std::vector<Expression>& arguments);
 
 }  // namespace gainsay::core
