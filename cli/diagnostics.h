@@ -1,5 +1,8 @@
 #pragma once
 
+#include "gainsay/cli/console.h"
+#include "gainsay/core/result.h"
+
 #include <cstddef>
 #include <ostream>
 #include <string>
@@ -29,5 +32,8 @@ void put_in_order(std::vector<Diagnostic>& diagnostics);
 
 /// `file:line:column: error: what`, then `    expected ...`, then `    to do: ...`.
 void print(std::ostream& out, const std::vector<Diagnostic>& diagnostics, bool colour);
+
+/// A failure that has no place in a file: `error: what`, expected, to do.
+void print_failure(const Console& console, const core::Failure& failure);
 
 }  // namespace gainsay::cli
