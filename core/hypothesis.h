@@ -77,6 +77,10 @@ Expression net(const Reaction& reaction);
 /// definitions written out.
 Expression written_out(const Expression& expression, const Hypothesis& hypothesis);
 
+/// The same for several expressions, which then share what they have in common.
+std::vector<Expression> written_out(const std::vector<Expression>& expressions,
+                                    const Hypothesis& hypothesis);
+
 /// Names of definitions that lead back to themselves, in order of the circle; empty if there is
 /// none.
 std::vector<std::string> circle(const std::vector<Definition>& definitions);

@@ -1,12 +1,9 @@
 #pragma once
 
 #include "gainsay/core/expression.h"
-#include "gainsay/core/hypothesis.h"
 
 #include <cstddef>
-#include <map>
 #include <string>
-#include <utility>
 #include <vector>
 
 namespace gainsay::core {
@@ -30,11 +27,5 @@ struct System {
   std::vector<Jump> jumps;
   std::vector<Expression> readouts;  ///< m
 };
-
-/// dx/dt of every species from stoichiometry, volumes and rates, as written by the author where
-/// possible (species, unknowns, knowns, inputs, t; compartments, reactions and definitions written
-/// out). Methods (1)-(3). Concentrations: (1/volume) sum nu flow; `rate` of reactions within one
-/// compartment: sum nu rate.
-std::vector<Expression> balance(const Hypothesis& hypothesis);
 
 }  // namespace gainsay::core
