@@ -2,11 +2,12 @@
 
 #include "gainsay/estimation/problem.h"
 #include "gainsay/estimation/search.h"
+#include "gainsay/stats/limits.h"
+#include "gainsay/stats/order.h"
 
 #include <cstddef>
 #include <cstdint>
 #include <functional>
-#include <limits>
 #include <optional>
 #include <stop_token>
 #include <string>
@@ -15,30 +16,6 @@
 namespace gainsay::stats {
 
 enum class Decision { Rejected, NotRejected, Undecided };
-enum class WhichLimit { Full, Reduced };
-
-inline constexpr double kNotComputed = std::numeric_limits<double>::quiet_NaN();
-
-/// One limit for V: the 1 - level quantile of chi-square with `freedom` degrees, and the upper tail
-/// at V.
-struct Limit {
-  double value = kNotComputed;
-  double freedom = 0.0;
-  double p_value = kNotComputed;
-  std::string not_offered;  ///< why, where it is not
-};
-
-/// The lag-1 test for order among the residuals; runs and Ljung-Box beside it under the same law.
-struct OrderTest {
-  double T = kNotComputed;  ///< sum of squared steps / sum of squares; small speaks against
-  double p_value = kNotComputed;
-  std::size_t draws = 0;
-  bool close = false;  ///< still within 3 standard errors of its share when the draws ended
-  double runs_p = kNotComputed;
-  double ljung_box_p = kNotComputed;
-  std::string not_counted;  ///< why, where order cannot count
-};
-
 /// Part of V (or, noise unknown, of the sum of squares) carried by one series, or by the priors
 /// ('earlier work').
 struct Share {
