@@ -62,7 +62,8 @@ Command check_command() {
           "and unknowns, "
           "warnings. All errors of all files come at once.",
       .options = {study(), json()},
-      .examples = {{"gainsay check data/nitrile", "what is in this study, and what looks wrong"}}};
+      .examples = {
+          {"gainsay check data/nitrile-demo", "what is in this study, and what looks wrong"}}};
 }
 
 Command equations_command() {
@@ -74,8 +75,8 @@ Command equations_command() {
               "and the three kinds of unknowns (kinetic, initial-condition, measurement).",
           .options = {study(), positional("HYPOTHESIS", "letter or title of one hypothesis [all]"),
                       choice("--as", {"text", "latex", "html"}, "text, latex or html [text]")},
-          .examples = {{"gainsay equations data/nitrile B", "the equations of hypothesis B"},
-                       {"gainsay equations data/nitrile --as latex > nitrile.tex",
+          .examples = {{"gainsay equations data/nitrile-demo B", "the equations of hypothesis B"},
+                       {"gainsay equations data/nitrile-demo --as latex > nitrile.tex",
                         "all of them, for a paper"}}};
 }
 
@@ -95,11 +96,12 @@ Command simulate_command() {
                   number("--until", "T", "last time to write"),
                   number("--every", "D", "distance between the times to write"),
                   flag("--sensitivities", "also the derivatives of every state by every unknown")},
-      .examples = {{"gainsay simulate data/nitrile --hypothesis A --experiment run-1 --set kcat1=2 "
-                    "--set Km1=10 "
-                    "--set Vmax2=1 --set Km2=5 --set scale.ammonia=1 --set offset.ammonia=0 "
-                    "--set scale.titrant=1 --until 60 --every 5",
-                    "curves of hypothesis A in run-1"}}};
+      .examples = {
+          {"gainsay simulate data/nitrile-demo --hypothesis A --experiment run-1 --set kcat1=2 "
+           "--set Km1=10 "
+           "--set Vmax2=1 --set Km2=5 --set scale.ammonia=1 --set offset.ammonia=0 "
+           "--set scale.titrant=1 --until 60 --every 5",
+           "curves of hypothesis A in run-1"}}};
 }
 
 Command judge_command() {
@@ -122,8 +124,8 @@ Command judge_command() {
                "--budget", "N",
                "integrations for each experiment and hypothesis [that of the study, else 20000]"),
            json()},
-      .examples = {{"gainsay judge data/nitrile",
-                    "verdicts on the terminal, the report in data/nitrile/results"},
+      .examples = {{"gainsay judge data/nitrile-demo",
+                    "verdicts on the terminal, the report in data/nitrile-demo/results"},
                    {"gainsay judge --seed 7 --threads 2",
                     "the study one stands in, with other random starts"}}};
 }
