@@ -7,6 +7,23 @@
 
 namespace gainsay::core {
 
+/// How tightly signs bind, loosest first; a call, a name or a bracket is Closed.
+enum class Binding : int { Or, And, Not, Comparison, Sum, Product, Minus, Power, Closed };
+
+/// The next tighter one; requires one that is not Closed.
+Binding tighter(Binding binding);
+
+/// A sign that stands between its operands. All group from the left, but comparisons, which do not
+/// chain, and the power, which groups from the right.
+struct InfixSign {
+  std::string_view text;
+  Operation operation;
+  Binding binding;
+};
+
+const InfixSign* find_infix_sign(std::string_view text);
+const InfixSign* find_infix_sign(Operation operation);
+
 /// A function as it is called in expressions.
 struct Function {
   std::string_view name;
@@ -30,5 +47,7 @@ struct NamedConstant {
 /// `pi`, and `gas_constant` [J/(mol K)], exact in the SI of 2019 (CODATA 2018: Tiesinga et al.
 /// 2021).
 std::span<const NamedConstant> all_constants();
+const NamedConstant* find_constant(std::string_view name);
+const NamedConstant* find_constant(double value);
 
 }  // namespace gainsay::core

@@ -13,36 +13,6 @@
 namespace gainsay::core {
 namespace {
 
-/// How strongly signs bind, weakest first.
-enum Strength : int { kLoosest = 0, kOr, kAnd, kNot, kComparison, kSum, kProduct, kMinus, kPower };
-
-struct BinarySign {
-  std::string_view text;
-  Operation operation;
-  Strength strength;
-};
-
-const BinarySign* find_binary_sign(const Token& token) {
-  static constexpr std::array kSigns{
-      BinarySign{"or", Operation::Or, kOr},
-      BinarySign{"and", Operation::And, kAnd},
-      BinarySign{"<", Operation::Less, kComparison},
-      BinarySign{"<=", Operation::LessEqual, kComparison},
-      BinarySign{">", Operation::Greater, kComparison},
-      BinarySign{">=", Operation::GreaterEqual, kComparison},
-      BinarySign{"==", Operation::Equal, kComparison},
-      BinarySign{"!=", Operation::NotEqual, kComparison},
-      BinarySign{"+", Operation::Add, kSum},
-      BinarySign{"-", Operation::Subtract, kSum},
-      BinarySign{"*", Operation::Multiply, kProduct},
-      BinarySign{"/", Operation::Divide, kProduct},
-      BinarySign{"^", Operation::Power, kPower},
-  };
-  const auto found = std::find_if(kSigns.begin(), kSigns.end(),
-                                  [&](const BinarySign& sign) { return sign.text == token.text; });
-  return found == kSigns.end() ? nullptr : &*found;
-}
-
 bool is_word_sign(std::string_view name) { return name == "and" || name == "or" || name == "not"; }
 
 /// Names that other notations have, or that this one will have, and what to do about them.
@@ -67,13 +37,6 @@ const OtherFunction* find_other_function(std::string_view name) {
   return found == kOtherFunctions.end() ? nullptr : &*found;
 }
 
-const NamedConstant* find_constant(std::string_view name) {
-  const std::span<const NamedConstant> all = all_constants();
-  const auto found = std::find_if(
-      all.begin(), all.end(), [&](const NamedConstant& constant) { return constant.name == name; });
-  return found == all.end() ? nullptr : &*found;
-}
-
 std::string quoted(std::string_view text) { return "'" + std::string(text) + "'"; }
 
 std::string joined(const std::vector<std::string>& words) {
@@ -87,7 +50,7 @@ struct Stop {
   Failure failure;
 };
 
-/// Descends by the strength of signs (Pratt 1973).
+/// Descends by how tightly signs bind (Pratt 1973).
 class Parser {
  public:
   Parser(std::vector<Token> tokens, const ParseContext& context)
@@ -97,7 +60,7 @@ class Parser {
     if (here().kind == TokenKind::End) {
       stop("the expression is empty", "a number, a name or '('", "write an expression", here());
     }
-    Expression expression = binary(kLoosest);
+    Expression expression = infix(Binding::Or);
     if (here().kind != TokenKind::End) stop_at_leftover();
     return {std::move(expression), std::move(names_)};
   }
@@ -115,20 +78,21 @@ class Parser {
     throw Stop{{std::move(what), std::move(expected), std::move(to_do), token.place}};
   }
 
-  /// What binds at least as strongly as `least`.
-  Expression binary(int least) {
+  /// What binds at least as tightly as `least`.
+  Expression infix(Binding least) {
     enter();
     Expression left = prefix(least);
     bool compared = false;
-    while (const BinarySign* sign = find_binary_sign(here())) {
-      if (sign->strength < least) break;
+    while (const InfixSign* sign = find_infix_sign(here().text)) {
+      if (sign->binding < least) break;
       const Token token = take();
-      if (sign->strength == kComparison && std::exchange(compared, true)) {
+      if (sign->binding == Binding::Comparison && std::exchange(compared, true)) {
         stop("comparisons do not chain", "'and', 'or', or the end of the comparison",
              "write 'a < b and b < c'", token);
       }
-      const int right = sign->operation == Operation::Power ? kPower : sign->strength + 1;
-      left = Expression::make(sign->operation, {left, binary(right)});
+      const bool to_the_right = sign->operation == Operation::Power;
+      const Binding right = to_the_right ? sign->binding : tighter(sign->binding);
+      left = Expression::make(sign->operation, {left, infix(right)});
     }
     --depth_;
     return left;
@@ -143,23 +107,23 @@ class Parser {
          "give parts of it names under [where]", here());
   }
 
-  Expression prefix(int least) {
+  Expression prefix(Binding least) {
     if (at("+")) {
       take();
-      return binary(kMinus);
+      return infix(Binding::Minus);
     }
     if (at("-")) {
       take();
       if (here().kind == TokenKind::Number && next().text != "^") return -take().number;
-      return -binary(kMinus);
+      return -infix(Binding::Minus);
     }
     if (at("not")) {
       const Token token = take();
-      if (least > kNot) {
-        stop("'not' cannot stand behind a stronger sign", "brackets around it", "write '(not a)'",
-             token);
+      if (least > Binding::Not) {
+        stop("'not' cannot stand behind a sign that binds tighter", "brackets around it",
+             "write '(not a)'", token);
       }
-      return Expression::make(Operation::Not, {binary(kNot)});
+      return Expression::make(Operation::Not, {infix(Binding::Not)});
     }
     return primary();
   }
@@ -173,7 +137,7 @@ class Parser {
     }
     if (token.text == "(" && token.kind == TokenKind::Sign) {
       take();
-      Expression inside = binary(kLoosest);
+      Expression inside = infix(Binding::Or);
       close(token);
       return inside;
     }
@@ -228,10 +192,10 @@ class Parser {
     const Token opened = take();
     std::vector<Expression> arguments;
     if (!at(")")) {
-      arguments.push_back(binary(kLoosest));
+      arguments.push_back(infix(Binding::Or));
       while (at(",")) {
         take();
-        arguments.push_back(binary(kLoosest));
+        arguments.push_back(infix(Binding::Or));
       }
     }
     close(opened);

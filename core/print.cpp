@@ -10,59 +10,19 @@
 namespace gainsay::core {
 namespace {
 
-/// How strongly the outermost sign of a text binds; the order is the parser's.
-enum Strength : int { kOr, kAnd, kNot, kComparison, kSum, kProduct, kMinus, kPower, kClosed };
-
 struct Shown {
   std::string text;
-  Strength strength = kClosed;
+  Binding binding = Binding::Closed;
 };
 
-struct BinarySign {
-  std::string_view text;
-  Strength strength;
-};
-
-BinarySign sign_of(Operation operation) {
-  switch (operation) {
-    case Operation::Or:
-      return {" or ", kOr};
-    case Operation::And:
-      return {" and ", kAnd};
-    case Operation::Less:
-      return {" < ", kComparison};
-    case Operation::LessEqual:
-      return {" <= ", kComparison};
-    case Operation::Greater:
-      return {" > ", kComparison};
-    case Operation::GreaterEqual:
-      return {" >= ", kComparison};
-    case Operation::Equal:
-      return {" == ", kComparison};
-    case Operation::NotEqual:
-      return {" != ", kComparison};
-    case Operation::Add:
-      return {" + ", kSum};
-    case Operation::Subtract:
-      return {" - ", kSum};
-    case Operation::Multiply:
-      return {" * ", kProduct};
-    case Operation::Divide:
-      return {" / ", kProduct};
-    default:
-      return {"^", kPower};
-  }
-}
-
-std::string bracketed(const Shown& shown, int least) {
-  return shown.strength < least ? "(" + shown.text + ")" : shown.text;
+std::string bracketed(const Shown& shown, Binding least) {
+  return shown.binding < least ? "(" + shown.text + ")" : shown.text;
 }
 
 Shown show_number(double value) {
-  for (const NamedConstant& constant : all_constants()) {
-    if (constant.value == value) return {std::string(constant.name)};
-  }
-  return {print_number(value), value < 0.0 ? kMinus : kClosed};
+  if (const NamedConstant* constant = find_constant(value)) return {std::string(constant->name)};
+  const std::string text = print_number(value);
+  return {text, text.front() == '-' ? Binding::Minus : Binding::Closed};
 }
 
 Shown show_call(const Function& function, const std::vector<Shown>& operands) {
@@ -71,40 +31,57 @@ Shown show_call(const Function& function, const std::vector<Shown>& operands) {
   return {text + ")"};
 }
 
-/// A bare number behind the minus would read back as a negative number.
 Shown show_negated(const Expression& negated, const Shown& operand) {
-  const bool bare =
-      negated.is_number() && operand.text.front() >= '0' && operand.text.front() <= '9';
-  return {"-" + (bare ? "(" + operand.text + ")" : bracketed(operand, kMinus)), kMinus};
+  // A bare number behind the minus would read back as a negative number.
+  const bool bare = negated.is_number() && operand.binding == Binding::Closed &&
+                    find_constant(negated.number()) == nullptr;
+  const std::string text = bare ? "(" + operand.text + ")" : bracketed(operand, Binding::Minus);
+  return {"-" + text, Binding::Minus};
 }
 
-Shown show_binary(Operation operation, const std::vector<Shown>& x) {
-  const BinarySign sign = sign_of(operation);
-  const bool to_the_right = operation == Operation::Power;
-  const bool chains = sign.strength != kComparison && !to_the_right;
-  const int least_left = chains ? sign.strength : sign.strength + 1;
-  // Behind a power a minus needs no brackets: 2^-x.
-  const int least_right = to_the_right ? kMinus : sign.strength + 1;
-  return {bracketed(x[0], least_left) + std::string(sign.text) + bracketed(x[1], least_right),
-          sign.strength};
+Shown show_infix(const InfixSign& sign, const Shown& left, const Shown& right) {
+  // A power is written without blanks, and a minus behind it needs no brackets: 2^-x.
+  if (sign.operation == Operation::Power) {
+    return {bracketed(left, Binding::Closed) + "^" + bracketed(right, Binding::Minus),
+            sign.binding};
+  }
+  const bool chains = sign.binding != Binding::Comparison;
+  return {bracketed(left, chains ? sign.binding : tighter(sign.binding)) + " " +
+              std::string(sign.text) + " " + bracketed(right, tighter(sign.binding)),
+          sign.binding};
 }
 
 Shown show(const Expression& node, const std::vector<Shown>& operands) {
   const Operation operation = node.operation();
   if (operation == Operation::Number) return show_number(node.number());
   if (operation == Operation::Symbol) return {node.name()};
-  if (const Function* function = find_function(operation)) return show_call(*function, operands);
   if (operation == Operation::Negate) return show_negated(node.operands()[0], operands[0]);
-  if (operation == Operation::Not) return {"not " + bracketed(operands[0], kNot), kNot};
-  return show_binary(operation, operands);
+  if (operation == Operation::Not) {
+    return {"not " + bracketed(operands[0], Binding::Not), Binding::Not};
+  }
+  if (const Function* function = find_function(operation)) return show_call(*function, operands);
+  return show_infix(*find_infix_sign(operation), operands[0], operands[1]);
 }
 
 }  // namespace
 
 std::string print_number(double value) {
-  std::array<char, 32> text{};
-  const auto written = std::to_chars(text.data(), text.data() + text.size(), value);
-  return {text.data(), written.ptr};
+  std::array<char, 400> room{};  // 309 digits before the point, or 324 behind it, and some
+  const auto written = [&](std::chars_format format) {
+    const auto end = std::to_chars(room.data(), room.data() + room.size(), value, format).ptr;
+    return std::string(room.data(), end);
+  };
+  std::string scientific = written(std::chars_format::scientific);
+  const std::size_t e = scientific.find('e');
+  if (e == std::string::npos) return scientific;  // infinity, nan
+  int exponent = 0;
+  const char* digits = scientific.data() + e + (scientific[e + 1] == '+' ? 2 : 1);
+  std::from_chars(digits, scientific.data() + scientific.size(), exponent);
+  scientific = scientific.substr(0, e + 1) + std::to_string(exponent);
+
+  const std::string fixed = written(std::chars_format::fixed);
+  const bool everyday = exponent >= -4 && exponent <= 6;
+  return everyday || fixed.size() <= scientific.size() ? fixed : scientific;
 }
 
 std::string print_text(const Expression& expression) { return fold<Shown>(expression, show).text; }

@@ -8,7 +8,7 @@
 
 namespace gainsay::core {
 
-/// Shortest text that reads back as the same double, independent of locale.
+/// Fewest digits that read back as the same double, independent of locale: 0.001, 250000, 1e-7.
 std::string print_number(double value);
 
 /// As a user would write it, with the fewest brackets; parse(print(e)) == e.
