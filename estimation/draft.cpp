@@ -92,7 +92,7 @@ class Drafting {
   }
 
   /// An addition in the unit of the state: an amount through the volume where the state is a
-  /// concentration, and the reverse. Methods (4).
+  /// concentration, and the reverse. Methods (5).
   Trouble take_dose(double at, const std::string& name, const Expression& size, bool is_amount) {
     if (auto trouble = require_species(name, "a dose")) return trouble;
     const auto number = core::find_species(hypothesis_, name);

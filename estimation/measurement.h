@@ -18,7 +18,7 @@ namespace gainsay::estimation {
 std::optional<std::string> scale_name(const Readout& readout, std::string_view experiment);
 std::optional<std::string> offset_name(const Readout& readout, std::string_view experiment);
 
-/// scale * shows + offset, the two as numbers or as symbols of the names above. Methods (5).
+/// scale * shows + offset, the two as numbers or as symbols of the names above. Methods (6).
 core::Expression measurement(const Readout& readout, const core::Expression& shows,
                              std::string_view experiment);
 

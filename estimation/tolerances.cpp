@@ -1,5 +1,7 @@
 #include "gainsay/estimation/tolerances.h"
 
+#include "gainsay/core/fold.h"
+
 #include <algorithm>
 #include <array>
 #include <cmath>
@@ -21,26 +23,29 @@ Kind kind_of(const core::Species& species) {
 }
 
 std::optional<Kind> kind_shown(const Expression& shows, const core::Hypothesis& hypothesis) {
-  const auto operands = shows.operands();
-  const auto of = [&](std::size_t i) { return kind_shown(operands[i], hypothesis); };
-  switch (shows.operation()) {
-    case Operation::Symbol:
-      if (const auto species = core::find_species(hypothesis, shows.name()))
-        return kind_of(hypothesis.species[*species]);
-      return std::nullopt;
-    case Operation::Negate:
-      return of(0);
-    case Operation::Add:
-    case Operation::Subtract:
-      return of(0) == of(1) ? of(0) : std::nullopt;
-    case Operation::Multiply:
-      if (operands[0].is_number()) return of(1);
-      return operands[1].is_number() ? of(0) : std::nullopt;
-    case Operation::Divide:
-      return operands[1].is_number() ? of(0) : std::nullopt;
-    default:
-      return std::nullopt;
-  }
+  using Shown = std::optional<Kind>;
+  return core::fold<Shown>(
+      shows, [&](const Expression& node, const std::vector<Shown>& of) -> Shown {
+        const auto operands = node.operands();
+        switch (node.operation()) {
+          case Operation::Symbol:
+            if (const auto species = core::find_species(hypothesis, node.name()))
+              return kind_of(hypothesis.species[*species]);
+            return std::nullopt;
+          case Operation::Negate:
+            return of[0];
+          case Operation::Add:
+          case Operation::Subtract:
+            return of[0] == of[1] ? of[0] : std::nullopt;
+          case Operation::Multiply:
+            if (operands[0].is_number()) return of[1];
+            return operands[1].is_number() ? of[0] : std::nullopt;
+          case Operation::Divide:
+            return operands[1].is_number() ? of[0] : std::nullopt;
+          default:
+            return std::nullopt;
+        }
+      });
 }
 
 double expected_value(const Unknown& unknown) {
