@@ -36,7 +36,7 @@ using Observer = std::function<bool(std::size_t output, std::span<const double> 
 class Integrator {
  public:
   /// `program` must outlive the integrator.
-  Integrator(const Program& program, Schedule schedule, Accuracy accuracy);
+  Integrator(const Program& program, Schedule schedule, const Accuracy& accuracy);
   ~Integrator();
   Integrator(Integrator&&) noexcept;
   Integrator& operator=(Integrator&&) noexcept;
@@ -52,7 +52,7 @@ class Integrator {
                                                     const Observer& observer = {});
 
   /// Replaces the accuracy (kept memory is rebuilt where needed).
-  void set_accuracy(Accuracy accuracy);
+  void set_accuracy(const Accuracy& accuracy);
   const Schedule& schedule() const;
   long steps_of_last_run() const;
 

@@ -74,7 +74,7 @@ struct ReferenceParts {
                                         static_cast<sunindextype>(motion.program->states()),
                                         context))),
         linear_solver(require_memory(SUNLinSol_Dense(y.get(), M.get(), context))) {
-    std::copy(motion.accuracy.absolute.begin(), motion.accuracy.absolute.end(),
+    std::copy(motion.absolute.begin(), motion.absolute.end(),
               NV_DATA_S(absolute.get()));
     for (std::size_t j = 1; j < columns; ++j) {
       owned.emplace_back(require_memory(N_VClone(y.get())));
@@ -98,7 +98,7 @@ class ReferenceStepper final : private ReferenceParts, public CvodesStepper {
  public:
   ReferenceStepper(Motion& motion, std::size_t columns, SUNContext context)
       : ReferenceParts(motion, columns, context), CvodesStepper(motion, context, y.get(), 1) {
-    const double relative = motion.accuracy.relative;
+    const double relative = motion.relative;
     require(CVodeInit(solver(), derivative, 0.0, y.get()));
     require(CVodeSetUserData(solver(), &seen));
     require(CVodeSVtolerances(solver(), relative, absolute.get()));

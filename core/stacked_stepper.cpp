@@ -28,11 +28,11 @@ int derivative(realtype t, N_Vector Z, N_Vector dZ_dt, void* data) {
 
 /// 1 / (relative |z| + absolute of the row).
 int weights(N_Vector Z, N_Vector result, void* data) {
-  const Accuracy& accuracy = view(data).motion.accuracy;
-  const double relative = accuracy.relative;
+  const Motion& motion = view(data).motion;
+  const double relative = motion.relative;
   const std::size_t columns = stacked_columns(Z);
   for (std::size_t i = 0; i < stacked_rows(Z); ++i) {
-    const double absolute = accuracy.absolute[i];
+    const double absolute = motion.absolute[i];
     const double* const from = stacked_data(Z) + i * columns;
     double* const to = stacked_data(result) + i * columns;
     for (std::size_t c = 0; c < columns; ++c) {

@@ -24,8 +24,9 @@ struct Trouble {
 struct Motion {
   const Program* program = nullptr;
   Program::Scratch* scratch = nullptr;
-  Accuracy accuracy;
-  std::vector<double> scale;  ///< of the moving unknowns
+  double relative = 0.0;         ///< tolerances of one step
+  std::vector<double> absolute;  ///< n
+  std::vector<double> scale;     ///< of the moving unknowns
   std::optional<Trouble> trouble;
 
   /// dZ/dt for Z = [y, s_1, ..., s_q], row-major with `columns` = 1 + q; q = 0: states alone. False
