@@ -97,11 +97,10 @@ Command simulate_command() {
                   number("--every", "D", "distance between the times to write"),
                   flag("--sensitivities", "also the derivatives of every state by every unknown")},
       .examples = {
-          {"gainsay simulate data/nitrile-demo --hypothesis A --experiment run-1 --set kcat1=2 "
-           "--set Km1=10 "
-           "--set Vmax2=1 --set Km2=5 --set scale.ammonia=1 --set offset.ammonia=0 "
-           "--set scale.titrant=1 --until 60 --every 5",
-           "curves of hypothesis A in run-1"}}};
+          {"gainsay simulate data/nitrile-demo --hypothesis A --experiment topped-up --set kcat1=1 "
+           "--set Km1=5 --set Vmax2=0.25 --set Km2=6 --set scale.absorbance=0.013 "
+           "--set offset.absorbance=0.12 --set scale.titrant=2 --until 120 --every 10",
+           "curves of hypothesis A in the run topped-up"}}};
 }
 
 Command judge_command() {

@@ -21,3 +21,11 @@ run(${SCRATCH}/installed/bin/gainsay --version)
 if(NOT said MATCHES "${VERSION}")
   message(FATAL_ERROR "gainsay --version says: ${said}")
 endif()
+
+foreach(installed share/man/man1/gainsay.1 share/bash-completion/completions/gainsay
+        share/zsh/site-functions/_gainsay share/fish/vendor_completions.d/gainsay.fish)
+  file(READ ${SCRATCH}/installed/${installed} text)
+  if(NOT text MATCHES "equations")
+    message(FATAL_ERROR "${installed} does not know the command 'equations'")
+  endif()
+endforeach()
