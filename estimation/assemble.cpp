@@ -89,16 +89,18 @@ void list_unknowns(Problem& problem, const Ground& ground, const Uses& uses) {
     take(std::move(unknown));
 }
 
-/// One group for each readout that has data without an sd of their own and an unknown sd.
+/// One group for each unknown sd that data without an sd of their own depend on; named after the
+/// readout that it is an unknown of.
 void group_noise(Problem& problem, std::vector<FittedSeries>& all) {
   for (auto& series : all) {
     const bool lacks_sd = std::any_of(series.data.begin(), series.data.end(),
                                       [](const Datum& datum) { return std::isnan(datum.sd); });
     if (!series.noise.sd_unknown || !lacks_sd) continue;
     auto& groups = problem.noise_groups;
-    const auto group = std::find(groups.begin(), groups.end(), series.readout);
+    const std::string& owner = series.noise.same_as.empty() ? series.readout : series.noise.same_as;
+    const auto group = std::find(groups.begin(), groups.end(), owner);
     series.noise_group = static_cast<std::size_t>(group - groups.begin());
-    if (group == groups.end()) groups.push_back(series.readout);
+    if (group == groups.end()) groups.push_back(owner);
   }
 }
 

@@ -1,6 +1,7 @@
 #pragma once
 
 #include <optional>
+#include <string>
 
 namespace gainsay::estimation {
 
@@ -10,6 +11,7 @@ struct Noise {
   std::optional<double> sd;        ///< in units of the readout
   std::optional<double> relative;  ///< of the modelled value
   bool sd_unknown = false;         ///< constant, fitted; then neither of the above
+  std::string same_as;             ///< the readout whose unknown sd this one shares; else empty
   bool operator==(const Noise&) const = default;
   bool said() const { return sd || relative || sd_unknown; }
   bool depends_on_model() const { return relative.value_or(0.0) != 0.0; }
