@@ -16,10 +16,6 @@ namespace gainsay::core {
 
 namespace {
 
-// A state may lie this many absolute tolerances below zero and still count as 0 in powers and
-// roots: the error that the solver was allowed.
-constexpr double kGuardInTolerances = 10.0;
-
 // The error that steps of a method of order q leave behind goes as tol^(q / (q + 1)) of their
 // tolerance tol, not as tol itself (Hairer, Norsett & Wanner 1993, II.4). So that a promise ten
 // times stricter is kept ten times better, steps are controlled beyond it where it is stricter than

@@ -18,6 +18,10 @@ namespace gainsay::core {
 /// to the tolerance.
 enum class Engine { Stacked, Reference };
 
+/// A state may lie this many absolute tolerances below zero and still count as 0 in powers and
+/// roots: the error that the solver was allowed.
+inline constexpr double kGuardInTolerances = 10.0;
+
 struct Accuracy {
   double relative = 1e-6;
   std::vector<double> absolute;  ///< n, in units of the states

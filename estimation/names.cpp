@@ -130,8 +130,9 @@ std::vector<std::string> Names::all_names() const {
 }
 
 Failure Names::failure(std::string what, std::string expected, std::string to_do) const {
-  return {"hypothesis " + quoted(hypothesis_.title) + " with experiment " +
-              quoted(experiment_.name) + ": " + std::move(what),
+  const std::string with =
+      experiment_.name.empty() ? "" : " with experiment " + quoted(experiment_.name);
+  return {"hypothesis " + quoted(hypothesis_.title) + with + ": " + std::move(what),
           std::move(expected), std::move(to_do), std::nullopt};
 }
 
