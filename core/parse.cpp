@@ -7,6 +7,7 @@
 
 #include <algorithm>
 #include <array>
+#include <cctype>
 #include <cstddef>
 #include <utility>
 
@@ -266,6 +267,12 @@ class Parser {
     if (token.text == ",") {
       stop("a comma stands outside the arguments of a function", "a sign such as + or *",
            "write the decimal sign of a number as a point", token);
+    }
+    std::string word(token.text);
+    std::transform(word.begin(), word.end(), word.begin(),
+                   [](unsigned char c) { return static_cast<char>(std::tolower(c)); });
+    if (is_word_sign(word) && word != token.text) {
+      stop("unknown sign " + quoted(token.text), quoted(word), "write it in small letters", token);
     }
     const std::string between = std::string(before.text) + " * " + std::string(token.text);
     stop("a sign is missing before " + quoted(token.text), "a sign such as + or *",

@@ -18,8 +18,12 @@ struct Piece {
   Edge begins = Edge::Block;
   Edge ends = Edge::Block;
   bool minus_first = false;
-  std::vector<Case> rows;              ///< of an `if`, so that one in its last row can join it
-  std::vector<std::string> arguments;  ///< of min and max, so that equal ones inside can join
+  /// What it is made of, where the piece around it may set that anew: the rows of an `if`, the
+  /// arguments of min and max, what a minus stands before, what stands above and below a line.
+  std::vector<Case> rows;
+  std::vector<std::string> arguments;
+  std::vector<Piece> behind_minus;
+  std::vector<Piece> above_and_below;
 };
 
 bool is_logic(const Piece& x) { return x.binding <= Binding::Comparison && x.rows.empty(); }
@@ -53,7 +57,7 @@ class Setting {
       case Operation::Multiply:
         return product(x[0], x[1]);
       case Operation::Divide:
-        return block(target_.fraction(as_number(x[0]), as_number(x[1])));
+        return quotient(x[0], x[1]);
       case Operation::Power:
         return power(x[0], x[1]);
       case Operation::Sqrt:
@@ -78,8 +82,9 @@ class Setting {
 
  private:
   static Piece closed(std::string text) { return {std::move(text)}; }
-  /// Needs no brackets among factors, but does below an exponent.
-  static Piece block(std::string text) { return {std::move(text), Binding::Minus}; }
+  static Piece without_parts(const Piece& x) {
+    return {x.text, x.binding, x.begins, x.ends, x.minus_first};
+  }
 
   Piece call(Operation function, const std::vector<std::string>& arguments) const {
     return {target_.call(function, arguments), Binding::Closed, Edge::Word, Edge::Bracket};
@@ -134,7 +139,9 @@ class Setting {
 
   Piece minus(const Piece& x) const {
     const Piece inside = placed_behind(x, Binding::Product);
-    return {target_.minus(inside.text), Binding::Minus, Edge::Block, inside.ends, true};
+    Piece piece{target_.minus(inside.text), Binding::Minus, Edge::Block, inside.ends, true};
+    piece.behind_minus = {inside};
+    return piece;
   }
 
   Piece sum(Operation sign, const Piece& a, const Piece& b, Binding least_behind) const {
@@ -150,6 +157,17 @@ class Setting {
     const Times sign = between_factors(left.ends, right.begins);
     return {target_.times(left.text, sign, right.text), Binding::Product, left.begins, right.ends,
             left.minus_first};
+  }
+
+  /// A minus goes before the line, and a / b / c stands on one line: a / (b c).
+  Piece quotient(const Piece& a, const Piece& b) const {
+    if (!a.behind_minus.empty()) return minus(quotient(a.behind_minus.front(), b));
+    if (!a.above_and_below.empty()) {
+      return quotient(a.above_and_below[0], product(a.above_and_below[1], b));
+    }
+    Piece piece{target_.fraction(as_number(a), as_number(b)), Binding::Minus};
+    piece.above_and_below = {without_parts(a), without_parts(b)};
+    return piece;
   }
 
   Piece power(const Piece& a, const Piece& b) const {
