@@ -54,6 +54,18 @@ std::string significant(double value, int digits) {
   return with_minus(to_text(value, std::chars_format::fixed, std::max(0, digits - 1 - exponent)));
 }
 
+std::string short_number(double value, int digits) {
+  std::string out = significant(value, digits);
+  const std::size_t point = out.find('.');
+  if (point == std::string::npos) return out;
+  std::size_t end = point + 1;
+  while (end < out.size() && out[end] >= '0' && out[end] <= '9') ++end;
+  std::size_t kept = end;
+  while (out[kept - 1] == '0') --kept;
+  if (kept == point + 1) kept = point;
+  return out.erase(kept, end - kept);
+}
+
 std::string fixed(double value, int decimals) {
   if (!std::isfinite(value)) return significant(value, 1);
   std::string out = to_text(value, std::chars_format::fixed, decimals);

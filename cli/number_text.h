@@ -9,6 +9,9 @@ namespace gainsay::cli {
 /// ten for what is below 0.001 or from 1,000,000 on; an en dash for what was not computed.
 std::string significant(double value, int digits);
 
+/// The same without zeros at the end: for labels and for numbers that somebody wrote.
+std::string short_number(double value, int digits);
+
 /// With so many digits after the point.
 std::string fixed(double value, int decimals);
 

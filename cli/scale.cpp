@@ -29,7 +29,7 @@ int decimals_of(double step) {
 
 std::string label_of(double value, double step) {
   const double size = std::max(std::abs(value), step);
-  if (size >= 1e5 || step < 1e-3) return value == 0.0 ? "0" : significant(value, 2);
+  if (size >= 1e5 || step < 1e-3) return value == 0.0 ? "0" : short_number(value, 2);
   return fixed(value, decimals_of(step));
 }
 
