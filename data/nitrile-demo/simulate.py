@@ -72,7 +72,7 @@ def main():
     folder = pathlib.Path(__file__).parent / "experiments"
     for name, (start, dose) in RUNS.items():
         with open(folder / f"{name}.csv", "w", encoding="utf-8") as table:
-            table.write("time (min),amide,absorbance,titrant\n")
+            table.write("time,amide,absorbance,titrant\n")
             for minute, amide, absorbance, titrant in rows(start, dose, noise):
                 table.write(f"{minute},{amide:.2f},{absorbance:.4f},{titrant:.4f}\n")
 

@@ -26,7 +26,7 @@ class Setup : public ::testing::Test {
     system(kDebian12);
     command("dpkg-query", kNothingInstalled);
     command("env", "while [[ $1 == *=* ]]; do shift; done; exec \"$@\"");
-    command("apt-get", "echo apt-get \"$@\"");
+    command("apt-get", "echo apt-get \"$@\" >&2");
     user("0");
   }
 
@@ -65,14 +65,16 @@ TEST_F(Setup, InstallsWhatIsMissingAsRoot) {
   command("dpkg-query", "printf 'cmake=installed ninja-build=config-files '");
   const testing::ProgramRun run = this->run("build");
   EXPECT_EQ(run.status, 0) << run.messages;
-  EXPECT_THAT(run.messages, HasSubstr("Installing from Debian's packages: g++ ninja-build"));
+  EXPECT_THAT(
+      run.messages,
+      HasSubstr("Installing from Debian's packages, which can take some minutes: g++ ninja-build"));
   EXPECT_THAT(run.messages, HasSubstr("apt-get -qq update\napt-get -qq install --yes"));
   EXPECT_THAT(run.messages, Not(HasSubstr("cmake"))) << "it is there already";
 }
 
 TEST_F(Setup, InstallsThroughSudoOtherwise) {
   user("1000");
-  command("sudo", "echo through sudo; exec \"$@\"");
+  command("sudo", "echo through sudo >&2; exec \"$@\"");
   const testing::ProgramRun run = this->run("build");
   EXPECT_EQ(run.status, 0) << run.messages;
   EXPECT_THAT(run.messages, HasSubstr("through sudo\napt-get -qq update"));
