@@ -200,6 +200,7 @@ Expression product(const Expression& a, const Expression& b) {
   if (a.is_number(1.0) || a.is_number(-1.0)) return multiple(a.number(), b);
   if (is(Operation::Negate, a)) return negated(product(operand(a), b));
   if (is(Operation::Negate, b)) return negated(product(a, operand(b)));
+  if (a == b) return power(a, 2.0);
   if (is(Operation::Divide, b) && operand(b).is_number(1.0)) return quotient(a, operand(b, 1));
   return gathered_product(a, b);
 }
