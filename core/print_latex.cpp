@@ -115,8 +115,9 @@ class Latex final : public Typesetter {
     return "\\frac{" + above + "}{" + below + "}";
   }
   std::string power(const std::string& base, const std::string& exponent) const override {
-    // Braces around the base: a name may carry a superscript of its own.
-    return "{" + base + "}^{" + exponent + "}";
+    // LaTeX takes no second superscript: a base with one of its own goes in braces.
+    const bool braces = base.find('^') != std::string::npos;
+    return (braces ? "{" + base + "}" : base) + "^{" + exponent + "}";
   }
   std::string root(const std::string& x) const override { return "\\sqrt{" + x + "}"; }
   std::string magnitude(const std::string& x) const override { return "\\left|" + x + "\\right|"; }
