@@ -24,19 +24,25 @@ inline std::string quoted(const std::string& word) {
   return text + "'";
 }
 
-/// Runs the built gainsay with these arguments, its outputs into files (so neither is a terminal).
-/// `before` is put in front: "cd folder &&", "NO_COLOR=1".
-inline ProgramRun run_gainsay(const std::vector<std::string>& arguments,
-                              const std::string& before = {}) {
+/// Runs the built gainsay with the rest of a shell's command line, its outputs into files (so
+/// neither is a terminal). `before` is put in front: "cd folder &&", "NO_COLOR=1".
+inline ProgramRun run_gainsay_line(const std::string& words, const std::string& before = {}) {
   const ScratchFolder scratch;
-  std::string line = before + " " + quoted(GAINSAY_BINARY);
-  for (const std::string& argument : arguments) line += " " + quoted(argument);
-  line += " >" + quoted((scratch.path() / "out").string()) + " 2>" +
-          quoted((scratch.path() / "messages").string()) + " </dev/null";
+  const std::string line = before + " " + quoted(GAINSAY_BINARY) + " " + words + " >" +
+                           quoted((scratch.path() / "out").string()) + " 2>" +
+                           quoted((scratch.path() / "messages").string()) + " </dev/null";
   const int ended = std::system(line.c_str());
   return {.status = WIFEXITED(ended) ? WEXITSTATUS(ended) : -1,
           .out = scratch.read("out"),
           .messages = scratch.read("messages")};
+}
+
+/// The same with these arguments, each as it is.
+inline ProgramRun run_gainsay(const std::vector<std::string>& arguments,
+                              const std::string& before = {}) {
+  std::string words;
+  for (const std::string& argument : arguments) words += " " + quoted(argument);
+  return run_gainsay_line(words, before);
 }
 
 }  // namespace gainsay::testing
