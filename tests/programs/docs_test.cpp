@@ -27,7 +27,8 @@ const fs::path kRoot = GAINSAY_SOURCE_DIR;
 
 std::vector<std::string> pages() {
   std::vector<std::string> names = {"README.md", "DEVELOPERS.md"};
-  for (const auto& entry : fs::directory_iterator(kRoot / "docs")) {
+  std::error_code none_yet;
+  for (const auto& entry : fs::directory_iterator(kRoot / "docs", none_yet)) {
     if (entry.path().extension() == ".md")
       names.push_back("docs/" + entry.path().filename().string());
   }
