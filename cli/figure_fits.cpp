@@ -197,12 +197,13 @@ Markup panel_of(const Page& page, const SeriesPicture& picture, const Scale& y) 
   return figure(panel);
 }
 
-Markup row_head(const estimation::Readout& readout, bool scales_differ) {
+Markup row_head(const estimation::Readout& readout, bool scales_differ, bool below) {
   Markup head = tag("b", text(title_of(readout)));
   std::string rest;
   const auto add = [&](const std::string& words) { rest += ", " + words; };
   if (!readout.unit.empty()) add(readout.unit);
-  if (readout.logarithmic_axis) add("log; values at or below zero stand at the lower edge");
+  if (readout.logarithmic_axis)
+    add(below ? "log; readings at or below zero at the lower edge" : "log");
   if (scales_differ) add("scales differ");
   return tag("h3", head + text(rest));
 }
@@ -235,7 +236,13 @@ Markup row_of(const Page& page, std::size_t readout, const std::vector<SeriesPic
   }
   const std::string kind =
       "panels columns-" + std::to_string(columns) + (first || !one_band ? " headed" : "");
-  return row_head(shown, scales.differ) + tag("div", {{"class", kind}}, panels);
+  const bool below =
+      shown.logarithmic_axis &&
+      std::any_of(row.begin(), row.end(), [](const SeriesPicture* picture) {
+        return std::any_of(picture->readings.begin(), picture->readings.end(),
+                           [](const Reading& reading) { return reading.value <= 0.0; });
+      });
+  return row_head(shown, scales.differ, below) + tag("div", {{"class", kind}}, panels);
 }
 
 Markup left_out_list(const std::vector<SeriesPicture>& pictures) {

@@ -49,6 +49,22 @@ std::vector<Agnode_t*> add_nodes(Agraph_t* drawn, const Graph& graph) {
   return nodes;
 }
 
+const char* compass(Graph::Side side) {
+  switch (side) {
+    case Graph::Side::Left:
+      return "w";
+    case Graph::Side::Right:
+      return "e";
+    case Graph::Side::Top:
+      return "n";
+    case Graph::Side::Bottom:
+      return "s";
+    case Graph::Side::Any:
+      break;
+  }
+  return "";
+}
+
 std::vector<Agedge_t*> add_lines(Agraph_t* drawn, const Graph& graph,
                                  const std::vector<Agnode_t*>& nodes) {
   std::vector<Agedge_t*> edges;
@@ -58,6 +74,8 @@ std::vector<Agedge_t*> add_lines(Agraph_t* drawn, const Graph& graph,
     Agedge_t* edge = agedge(drawn, nodes.at(line.from), nodes.at(line.to), name.data(), 1);
     set(edge, "arrowhead", "none");
     if (!line.ranks) set(edge, "constraint", "false");
+    if (line.leaves != Graph::Side::Any) set(edge, "tailport", compass(line.leaves));
+    if (line.enters != Graph::Side::Any) set(edge, "headport", compass(line.enters));
     edges.push_back(edge);
   }
   return edges;
@@ -86,8 +104,8 @@ std::optional<Layout> lay_out(const Graph& graph) {
   const std::unique_ptr<Agraph_t, CloseGraph> drawn(agopen(name.data(), Agdirected, nullptr));
   if (context == nullptr || drawn == nullptr) return std::nullopt;
   set(drawn.get(), "rankdir", "LR");
-  set(drawn.get(), "nodesep", "0.22");
-  set(drawn.get(), "ranksep", "0.34");
+  set(drawn.get(), "nodesep", "0.42");
+  set(drawn.get(), "ranksep", "0.5");
   set(drawn.get(), "splines", "true");
   const std::vector<Agnode_t*> nodes = add_nodes(drawn.get(), graph);
   const std::vector<Agedge_t*> edges = add_lines(drawn.get(), graph, nodes);

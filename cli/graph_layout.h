@@ -15,6 +15,7 @@ struct Spot {
 
 /// A graph to be laid out: nodes of given size, directed lines between them.
 struct Graph {
+  enum class Side { Any, Left, Right, Top, Bottom };
   struct Node {
     double width = 0.0;  ///< in pixels of the picture
     double height = 0.0;
@@ -22,7 +23,9 @@ struct Graph {
   struct Line {
     std::size_t from = 0;
     std::size_t to = 0;
-    bool ranks = true;  ///< whether it takes part in ordering from left to right
+    bool ranks = true;        ///< whether it takes part in ordering from left to right
+    Side leaves = Side::Any;  ///< where it touches its ends
+    Side enters = Side::Any;
   };
   std::vector<Node> nodes;
   std::vector<Line> lines;

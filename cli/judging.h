@@ -3,6 +3,7 @@
 #include "gainsay/cli/diagnostics.h"
 #include "gainsay/cli/judgement.h"
 #include "gainsay/cli/study_reader.h"
+#include "gainsay/cli/verdict_words.h"
 
 #include <cstddef>
 #include <functional>
@@ -38,9 +39,6 @@ core::Result<estimation::Problem> assemble_problem(const Study& study, std::size
 /// those that were finished. `reading` holds a study without errors.
 Judgement judge_study(const StudyReading& reading, const JudgingOptions& options,
                       const JudgingObserver& observer);
-
-/// "The data contradict four of six mechanisms; two are not rejected."
-std::string verdict_sentence(const Judgement& judgement);
 
 /// "rejected", "not rejected", "undecided".
 std::string word(stats::Decision decision);

@@ -36,6 +36,8 @@ class MechanismGraph {
   void join(LineKind kind, const std::string& reaction, const std::string& species,
             std::size_t from, std::size_t to);
 
+  void choose_sides(const Layout& first);
+
   Graph graph_;
   std::map<std::string, std::size_t> species_;
   std::map<std::string, std::size_t> reactions_;

@@ -98,7 +98,7 @@ clip-path:inset(50%)}
 .panel text.end{fill:var(--hue);font-weight:600;font-size:.69rem}
 .grid{stroke:var(--faint)}
 .base,.zero{stroke:var(--hair)}
-.two,.between,line.faint{stroke:var(--faint)}
+line.two,line.between,line.faint{stroke:var(--faint)}
 .spot,.leaders,.panel .spot{overflow:visible}
 .square{overflow:hidden}
 .curve{fill:none;stroke:var(--hue);stroke-width:1.7;stroke-linejoin:round;
@@ -122,10 +122,11 @@ vector-effect:non-scaling-stroke}
 .search text.limit{stroke:none;text-anchor:end}
 .unknowns{margin-bottom:1.7rem}
 .unknowns table{width:100%;table-layout:fixed}
-.unknowns th:first-child{width:17%}
+.unknowns th:first-child{width:16%}
 .unknowns .n{width:10%}
 .unknowns .interval{width:17%}
-.unknowns .edge{width:8%;color:var(--grey);font-size:.74rem;white-space:nowrap}
+.unknowns .words{width:23%}
+.unknowns .edge{width:7%;color:var(--grey);font-size:.74rem;white-space:nowrap}
 .unknowns td.n.edge{padding-right:.6rem}
 .unknowns .drawn{padding-right:.6rem}
 .unknowns td,.unknowns th{vertical-align:middle}
@@ -149,9 +150,10 @@ vector-effect:non-scaling-stroke}
 .own .way{stroke-width:1.7}
 .own .head{fill:var(--hue)}
 .mechanism .own text{fill:var(--hue)}
-.equations{margin-bottom:1.6rem}
+.systems{display:grid;gap:1.4rem 2.4rem}
+.side-by-side.systems{grid-template-columns:repeat(2,minmax(0,1fr))}
 .equation{margin:0 0 .55rem;overflow-x:auto;overflow-y:hidden}
-.equations math{font-size:1.06rem}
+.equations math{font:1.06rem/1.2 "STIX Two Math","STIX Math","Cambria Math","Latin Modern Math",math}
 )css";
 
 constexpr const char* kScripted = R"css(
@@ -179,7 +181,7 @@ section{grid-template-columns:minmax(0,1fr)}
 .panels figcaption,.panels:not(.headed) figcaption{position:static;width:auto;height:auto;
 clip-path:none}
 .gap{display:none}
-.two.mechanisms{grid-template-columns:minmax(0,1fr)}
+.two.mechanisms,.side-by-side.systems{grid-template-columns:minmax(0,1fr)}
 }
 @media screen and (max-width:600px){
 body{padding:1.1rem 1.1rem 2.5rem}
@@ -190,7 +192,7 @@ h1{font-size:1.5rem}
 .verdicts thead,.verdicts .axis{display:none}
 .verdicts tbody tr{display:grid;grid-template-columns:minmax(0,1fr) auto;column-gap:1rem;
 padding:.7rem 0 .6rem;border-bottom:1px solid var(--hair)}
-.verdicts tbody tr th{grid-area:1/1;width:auto;padding:0}
+.verdicts tbody tr th:first-child{grid-area:1/1;width:auto;padding:0}
 .verdicts tbody tr td.word{grid-area:1/2;padding:0;align-self:start}
 .verdicts tbody tr td.drawn{grid-area:2/1/3/3;width:auto;height:1.9rem;padding:0}
 .verdicts tbody tr td.drawn svg{height:1.9rem}
@@ -229,8 +231,7 @@ h1{font-size:1.6rem}
 h2,h3{break-after:avoid}
 .panel>svg{height:6.2rem}
 .residuals>svg{height:4.2rem}
-.equations{columns:2;column-gap:2rem}
-.equations .equation{break-inside:avoid}
+.equation{break-inside:avoid;overflow:visible}
 .verdicts .drawn{width:25%}
 }
 )css";

@@ -5,6 +5,7 @@
 #include "gainsay/core/balance.h"
 #include "gainsay/core/print.h"
 
+#include <algorithm>
 #include <string>
 
 namespace gainsay::cli {
@@ -110,6 +111,19 @@ std::string derivative_by_time(const std::string& name) {
          "</mrow><mrow>" + d + "<mi>t</mi></mrow></mfrac>";
 }
 
+constexpr std::size_t kLongEquation = 62;  // letters of a right side that half the width can hold
+
+std::size_t longest(const core::Hypothesis& mechanism) {
+  std::size_t most = 0;
+  const auto take = [&](const core::Expression& right) {
+    most = std::max(most, core::print_text(right).size());
+  };
+  for (const core::Expression& right : core::balance_by_name(mechanism)) take(right);
+  for (const core::Reaction& reaction : mechanism.reactions) take(core::net(reaction));
+  for (const core::Definition& definition : mechanism.definitions) take(definition.meaning);
+  return most;
+}
+
 /// Derivatives in the names of reactions, then what these stand for.
 Markup system_of_equations(const core::Hypothesis& mechanism) {
   const std::vector<core::Expression> derivatives = core::balance_by_name(mechanism);
@@ -152,16 +166,19 @@ Markup reasons(const Page& page) {
 
 Markup equations(const Page& page) {
   Markup all;
+  bool is_long = false;
   for (const Contender& contender : page.contenders) {
     if (contender.outcome == nullptr) continue;
+    const core::Hypothesis& mechanism = contender.hypothesis->mechanism;
+    is_long = is_long || longest(mechanism) > kLongEquation;
     all += tag("div", {{"class", "equations " + classes(contender)}},
-               tag("h3", letter_and_name(contender)) +
-                   system_of_equations(contender.hypothesis->mechanism));
+               tag("h3", letter_and_name(contender)) + system_of_equations(mechanism));
   }
-  return section({"equations", "Equations",
-                  paragraph("The derivative of each species by time, in the rates of the "
-                            "reactions; then what these are."),
-                  all});
+  return section(
+      {"equations", "Equations",
+       paragraph("The derivative of each species by time, in the rates of the reactions; then "
+                 "what these are."),
+       tag("div", {{"class", is_long ? "systems" : "systems side-by-side"}}, all)});
 }
 
 Markup tables(const Page& page) {
