@@ -205,7 +205,7 @@ core::Result<std::map<std::string, double>> read_settings(
 }
 
 int run_simulate(const SimulateOptions& options, const Console& console) {
-  const StudyReading reading = read_study(options.study);
+  const StudyReading reading = read_study(options.study, ReadFor::Looking);
   print(console.messages, reading.diagnostics, console.colour);
   if (!reading.study) return kWrongInput;
   const auto table = simulate(options, *reading.study);

@@ -1,0 +1,16 @@
+#pragma once
+
+#include "gainsay/cli/diagnostics.h"
+#include "gainsay/cli/hypothesis_reader.h"
+#include "gainsay/cli/study_files.h"
+
+#include <vector>
+
+namespace gainsay::cli {
+
+/// Reads hypotheses/*.toml in order of file name: follows each `base`, merges amendments, gives
+/// letters. A file whose name begins with `_` serves as a base only. A file with a syntax error is
+/// said and left out, and so is what amends it.
+std::vector<HypothesisReading> read_hypotheses(StudyFiles& files, Diagnostics& diagnostics);
+
+}  // namespace gainsay::cli
