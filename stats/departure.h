@@ -5,7 +5,7 @@
 namespace gainsay::stats {
 
 /// How large a departure the test of V catches nine times in ten: the least L with
-/// P(chi-square(freedom, noncentrality L) > limit) = 0.9. Methods (48). 0 where even no departure
+/// P(chi-square(freedom, noncentrality L) > limit) = 0.9. Methods (67). 0 where even no departure
 /// passes the limit that often.
 double least_noncentrality(double limit, double freedom);
 

@@ -21,7 +21,7 @@ struct FreeColumns {
   Eigen::MatrixXd W;                  ///< free x free, right singular vectors
 };
 
-/// J is N x all unknowns, finite; `on_bound` has one entry an unknown. Methods (43). The free ones
+/// J is N x all unknowns, finite; `on_bound` has one entry an unknown. Methods (63). The free ones
 /// alone count: the fit is a projection on a cone whose face they span (Bartholomew 1961, Shapiro
 /// 1988).
 FreeColumns free_columns(const Eigen::MatrixXd& J, const std::vector<bool>& on_bound);

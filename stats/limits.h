@@ -25,13 +25,13 @@ struct Limit {
   bool passed() const { return offered() && V > value; }
 };
 
-/// The full limit: chi-square with N degrees, Methods (41). Needs no linearisation and no count of
+/// The full limit: chi-square with N degrees, Methods (61). Needs no linearisation and no count of
 /// unknowns: the least V cannot exceed V at the truth, which has this law if the truth lies within
 /// the ranges. Requires N > 0, 0 < level < 1.
 Limit full_limit(double least_V, std::size_t N, double level);
 
 /// The reduced limit: chi-square with N - k degrees, k the rank of the weighted sensitivities over
-/// the free unknowns (free_columns.h), Methods (42). Linear near the optimum (Seber & Wild 1989).
+/// the free unknowns (free_columns.h), Methods (62). Linear near the optimum (Seber & Wild 1989).
 /// Not offered where N <= k.
 Limit reduced_limit(double V, std::size_t N, std::size_t k, double level);
 

@@ -33,7 +33,7 @@ struct OrderPlan {
 
 /// Tests the residuals r (N; data, then priors) of a fit whose free columns of J span Q
 /// (N x k, orthonormal; free_columns.h). The null law of each statistic is that of (I - Q Q') e,
-/// e ~ N(0, I): Methods (45). No refit is needed, and fitted residuals are not taken for white
+/// e ~ N(0, I): Methods (65). No refit is needed, and fitted residuals are not taken for white
 /// noise. P = (b + 1) / (B + 1), b of B draws at least as much against (Davison & Hinkley 1997); B
 /// grows tenfold while P is within 3 standard errors of the share. Draws are keyed by (seed,
 /// number). Order cannot count where there is no series of two places, N - k = 1, T can take one

@@ -1,6 +1,7 @@
 #include "gainsay/stats/order_statistics.h"
 
 #include "gainsay/core/require.h"
+#include "gainsay/stats/standardized.h"
 
 #include <algorithm>
 #include <cmath>
@@ -32,15 +33,16 @@ Eigen::ArrayXXd gathered(const Eigen::MatrixXd& R, const OrderedSeries& series) 
   return at_places;
 }
 
-/// 1 / sd^2 of each noise group, from each set: sets x groups.
-Eigen::ArrayXXd precisions(const Eigen::MatrixXd& R, const OrderLayout& layout) {
-  Eigen::ArrayXXd squares = Eigen::ArrayXXd::Zero(R.rows(), layout.noise_groups.size());
-  for (std::size_t group = 0; group < layout.noise_groups.size(); ++group) {
-    for (const std::size_t i : layout.noise_groups[group])
-      squares.col(group) += R.col(i).array().square();
-    squares.col(group) /= static_cast<double>(layout.noise_groups[group].size());
+/// Each set divided by the sds that it gives to the groups of fitted sd.
+Eigen::MatrixXd in_units_of_fitted_sd(const Eigen::MatrixXd& R, const OrderLayout& layout) {
+  Eigen::MatrixXd scaled = R;
+  for (const std::vector<std::size_t>& group : layout.noise_groups) {
+    Eigen::ArrayXd squares = Eigen::ArrayXd::Zero(R.rows());
+    for (const std::size_t i : group) squares += R.col(i).array().square();
+    const Eigen::ArrayXd sd = (squares / static_cast<double>(group.size())).sqrt();
+    for (const std::size_t i : group) scaled.col(i).array() /= sd;
   }
-  return squares.inverse();
+  return scaled;
 }
 
 Eigen::ArrayXd sum_of_squares(const Eigen::ArrayXXd& r) {
@@ -82,11 +84,9 @@ OrderLayout order_layout(const estimation::Problem& problem) {
   for (const estimation::FittedExperiment& experiment : problem.experiments) {
     for (const estimation::FittedSeries& series : experiment.series) {
       OrderedSeries ordered = in_order(series, layout.residuals);
-      if (series.noise.sd_unknown) {
-        ordered.noise_group = series.noise_group;
-        for (std::size_t i = 0; i < series.data.size(); ++i)
+      for (std::size_t i = 0; i < series.data.size(); ++i)
+        if (has_unknown_sd(series, series.data[i]))
           layout.noise_groups[series.noise_group].push_back(layout.residuals + i);
-      }
       layout.residuals += series.data.size();
       if (ordered.places.size() >= 2) layout.series.push_back(std::move(ordered));
     }
@@ -103,18 +103,12 @@ OrderStatistics order_statistics(const Eigen::MatrixXd& R, const OrderLayout& la
   OrderStatistics statistics{zero, zero, zero};
   Eigen::ArrayXd steps = zero;
   Eigen::ArrayXd squares = zero;
-  const Eigen::ArrayXXd precision = precisions(R, layout);
+  const Eigen::MatrixXd scaled = in_units_of_fitted_sd(R, layout);
   for (const OrderedSeries& series : layout.series) {
-    const Eigen::ArrayXXd r = gathered(R, series);
+    const Eigen::ArrayXXd r = gathered(scaled, series);
     const Eigen::ArrayXd own_squares = sum_of_squares(r);
-    const Eigen::ArrayXd own_steps = sum_of_squared_steps(r);
-    if (series.noise_group) {
-      steps += own_steps * precision.col(*series.noise_group);
-      squares += own_squares * precision.col(*series.noise_group);
-    } else {
-      steps += own_steps;
-      squares += own_squares;
-    }
+    steps += sum_of_squared_steps(r);
+    squares += own_squares;
     statistics.runs += runs(r);
     statistics.ljung_box += ljung_box(r, own_squares);
   }

@@ -5,7 +5,6 @@
 #include <Eigen/Core>
 
 #include <cstddef>
-#include <optional>
 #include <vector>
 
 namespace gainsay::stats {
@@ -13,7 +12,6 @@ namespace gainsay::stats {
 /// The residuals of one readout in one experiment, in order of time.
 struct OrderedSeries {
   std::vector<std::vector<std::size_t>> places;  ///< numbers of the residuals at each place
-  std::optional<std::size_t> noise_group;        ///< where their sd is fitted
 };
 
 /// Which residuals follow each other. Priors and series of one place are left out.
@@ -34,7 +32,7 @@ struct OrderStatistics {
 
 /// R is sets x N, standardized residuals (of data whose sd is fitted: up to the sd of their group,
 /// which is estimated from each set anew, as the fit does). n replicates at one place count as
-/// sqrt(n) times their mean. Methods (44)
+/// sqrt(n) times their mean. Methods (64)
 ///   T = sum over series and i >= 2 of (r_i - r_(i-1))^2 / sum over the same series of r_i^2
 /// (von Neumann 1941; Durbin & Watson 1950), never across the joint of two series;
 /// runs (Wald & Wolfowitz 1940) of the signs; Q = n (n + 2) sum over h of rho_h^2 / (n - h)

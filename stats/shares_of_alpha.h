@@ -8,7 +8,7 @@ struct SharesOfAlpha {
   double order = 0.2;  ///< 0 where order cannot count
 };
 
-/// 4/5 for V and 1/5 for order; one alone has all; none has nothing to test with. Methods (46).
+/// 4/5 for V and 1/5 for order; one alone has all; none has nothing to test with. Methods (66).
 SharesOfAlpha shares_of_alpha(bool V_counts, bool order_counts);
 
 /// The P shown for the verdict: min(1, P_V / share, P_order / share), at most alpha exactly where

@@ -67,8 +67,6 @@ TEST(LagOneStatistic, TakesReplicatesByTheirWeightedMean) {
 
 TEST(LagOneStatistic, DoesNotFeelTheSdThatAGroupIsFittedWith) {
   OrderLayout layout = layout_of({plain_series(0, 3), plain_series(3, 3)}, 6);
-  layout.series[0].noise_group = 0;
-  layout.series[1].noise_group = 1;
   layout.noise_groups = {{0, 1, 2}, {3, 4, 5}};
   Eigen::MatrixXd R(2, 6);
   R << 1, -2, 1, 3, 1, 2, 1, -2, 1, 300, 100, 200;
@@ -141,10 +139,9 @@ TEST(OrderLayout, KnowsWhichResidualsShareAFittedSd) {
   for (estimation::FittedSeries* series :
        {&problem.experiments[0].series[1], &problem.experiments[1].series[0]})
     series->noise.sd_unknown = true;
+  problem.experiments[0].series[1].data[0].sd = 0.1;  // its own: known
   const OrderLayout layout = order_layout(problem);
-  EXPECT_EQ(layout.noise_groups, (std::vector<std::vector<std::size_t>>{{2, 3, 4}}));
-  EXPECT_EQ(layout.series[0].noise_group, std::nullopt);
-  EXPECT_EQ(layout.series[1].noise_group, 0U);
+  EXPECT_EQ(layout.noise_groups, (std::vector<std::vector<std::size_t>>{{3, 4}}));
 }
 
 TEST(OrderStatistics, OfResidualsThatAreAllZeroAreNoNumber) {
