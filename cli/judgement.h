@@ -4,7 +4,7 @@
 #include "gainsay/core/network.h"
 #include "gainsay/estimation/curves.h"
 #include "gainsay/estimation/problem.h"
-#include "gainsay/stats/verdict.h"
+#include "gainsay/stats/judge.h"
 
 #include <cstddef>
 #include <memory>

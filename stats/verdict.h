@@ -1,71 +1,48 @@
 #pragma once
 
-#include "gainsay/estimation/problem.h"
-#include "gainsay/estimation/search.h"
+#include "gainsay/stats/dependence.h"
+#include "gainsay/stats/intervals.h"
 #include "gainsay/stats/limits.h"
+#include "gainsay/stats/moved_bounds.h"
 #include "gainsay/stats/order.h"
+#include "gainsay/stats/shares.h"
+#include "gainsay/stats/standardized.h"
 
 #include <cstddef>
-#include <cstdint>
-#include <functional>
 #include <optional>
-#include <stop_token>
 #include <string>
 #include <vector>
 
 namespace gainsay::stats {
 
 enum class Decision { Rejected, NotRejected, Undecided };
-/// Part of V (or, noise unknown, of the sum of squares) carried by one series, or by the priors
-/// ('earlier work').
-struct Share {
-  std::string experiment;
-  std::string readout;
-  std::size_t points = 0;
-  double V = 0.0;
-};
 
-/// One fitted point as the pages show it.
-struct StandardResidual {
-  std::size_t experiment = 0;  ///< numbers in the Problem
-  std::size_t series = 0;
-  std::size_t datum = 0;
-  double shown = 0.0;
-  double sd = 0.0;
-  double r = 0.0;  ///< (observed - shown) / sd
-};
-
-/// Linear interval of one unknown at the best fit: x +- t or z times its standard error in search
-/// coordinates, back in natural units; Methods, "Linear intervals".
-struct Interval {
-  std::string unknown;
-  double estimate = kNotComputed;
-  double low = kNotComputed;
-  double high = kNotComputed;
-  double standard_error = kNotComputed;  ///< natural units (delta method)
-  bool determined = false;               ///< false: the data leave it free, no interval
-  bool on_bound = false;
-  std::string words;  ///< "on its lower bound", "not determined by these data"
-};
-
-/// A bound that was moved out because a fit about to be rejected lay on it.
-struct MovedBound {
-  std::string unknown;
-  bool lower = false;
-  double stated = 0.0;
-  double moved_to = 0.0;
-  double V = kNotComputed;  ///< least V found in the wider range
+/// What a decision rests on.
+enum class Ground {
+  MisfitAboveLimit,       ///< rejected
+  ResidualsInOrder,       ///< rejected
+  NothingSpeaksAgainst,   ///< not rejected
+  CannotBeIntegrated,     ///< undecided, as are all below: no start could be integrated
+  ReadoutsDepend,         ///< linearly, and their shared noise is not stated
+  NoFreedom,              ///< N <= k: cannot be tested
+  NothingToTest,          ///< the noise is unknown and order cannot count
+  NoConvergence,          ///< no descent converged and none came below the limit
+  TooFewStarts,           ///< something speaks against, but the search is not convincing
+  MisfitTooNearLimit,     ///< by the accuracy of the integration
+  FailsAtTighterControl,  ///< so that this accuracy is not known
+  OrderTooNearShare       ///< by the count of draws
 };
 
 /// Everything about one hypothesis that its data say.
 struct Verdict {
   Decision decision = Decision::Undecided;
+  Ground ground = Ground::CannotBeIntegrated;
   std::string reason;                  ///< weightiest, short: one line of a table
   std::vector<std::string> sentences;  ///< why, in full sentences
-  bool only_within_range = false;      ///< 'rejected only within the range of ...'
+  bool only_within_range = false;      ///< rejected, but not with the bounds of `moved` moved out
 
-  double V = kNotComputed;
-  double V_tighter = kNotComputed;  ///< at tolerances 100 times tighter
+  double V = kNotComputed;          ///< at the best fit; where sd is fitted, in units of that sd
+  double V_tighter = kNotComputed;  ///< V of the deciding limit at tolerances 100 times tighter
   std::size_t N = 0;
   std::size_t k = 0;
   double alpha = 0.05;
@@ -79,7 +56,9 @@ struct Verdict {
   double departure_sd =
       kNotComputed;  ///< 'all N points off by so many sd' caught nine times in ten
   bool noise_unknown = false;
+  std::optional<Dependence> dependence;
 
+  std::vector<FittedNoise> fitted_noise;  ///< of each readout whose sd is unknown
   std::vector<Share> shares;
   std::vector<StandardResidual> residuals;
   std::vector<Interval> intervals;
@@ -90,28 +69,21 @@ struct Verdict {
   double AIC = kNotComputed;
   double AICc = kNotComputed;  ///< where sd is fitted
   double BIC = kNotComputed;
+
+  const Limit& deciding_limit() const;
+  bool V_counts() const { return share_of_V > 0.0; }
+  bool order_counts() const { return share_of_order > 0.0; }
+  /// |V - limit| is at most what tighter tolerances change V by, or that is not known.
+  bool V_too_near_limit() const;
+  /// V passes the deciding limit, and not by the integration's error alone.
+  bool V_speaks_against() const;
+  /// P of order is at most its share of alpha, and not by the luck of the draws alone.
+  bool order_speaks_against() const;
 };
 
-struct JudgeOptions {
-  double alpha = 0.05;
-  std::optional<WhichLimit> decides;  ///< what the study says
-  estimation::SearchPlan plan;
-  bool until_convincing = true;
-};
-
-struct Judged {
-  estimation::SearchResult search;
-  Verdict verdict;
-};
-
-/// Searches, tests and decides one hypothesis. Depends on the problem, the options and nothing
-/// else.
-Judged judge(const estimation::Problem& problem, const JudgeOptions& options,
-             const estimation::SearchObserver& observer = {});
-
-/// Akaike weights among those not rejected (AICc where sd is fitted), in the order given; Burnham &
-/// Anderson (2002). Meaningful only on equal data and noise; NaN for those that are rejected or
-/// undecided without a fit.
+/// Akaike weights among those not rejected (AICc where sd is fitted), in the order given
+/// (akaike_weights in rivals.h). Meaningful only on equal data and noise; NaN for those that are
+/// rejected or without a fit.
 std::vector<double> weights(const std::vector<const Verdict*>& verdicts);
 
 }  // namespace gainsay::stats
