@@ -62,9 +62,9 @@ TEST(StateSpace, UnknownsComeByKind) {
               ElementsAre("kf: 0.1 to 1; earlier work: 0.5, sd 0.1", "kb: 0.1 to 1",
                           "kcat: 0.01 to 100 1/min"));
   EXPECT_THAT(lines(form, "Initial-condition unknowns"), ElementsAre("c0: 1 to 10"));
-  EXPECT_THAT(lines(form, "Measurement unknowns"),
-              ElementsAre("scale.glow[low]: 2e-6 to 2000000",
-                          "offset.glow: -20 to 20, on a linear scale"));
+  EXPECT_THAT(
+      lines(form, "Measurement unknowns"),
+      ElementsAre("scale.glow[low]: 2e-6 to 2000000", "offset.glow: -20 to 20, on a linear scale"));
 }
 
 TEST(StateSpace, InputsAndKnownsAreGroupedByValue) {
