@@ -61,7 +61,7 @@ std::string written(const std::vector<StateSpace>& forms, const Study& study, Eq
 }  // namespace
 
 int run_equations(const EquationsOptions& options, const Console& console) {
-  const StudyReading reading = read_study(options.study);
+  const StudyReading reading = read_study(options.study, ReadFor::Looking);
   print(console.messages, reading.diagnostics, console.colour);
   if (!reading.study) return kWrongInput;
   const auto forms = forms_of(options, *reading.study);

@@ -1,5 +1,6 @@
 #include "gainsay/cli/equations.h"
 
+#include "gainsay/cli/reaction_equation.h"
 #include "gainsay/core/balance.h"
 #include "gainsay/core/print.h"
 #include "gainsay/estimation/course.h"
@@ -53,23 +54,6 @@ std::string in_experiments(const std::vector<std::string>& names, const Study& s
   return fmt::format("in {}", fmt::join(names, ", "));
 }
 
-std::string side(const std::vector<core::Term>& terms, const Hypothesis& hypothesis) {
-  std::string text;
-  for (const auto& term : terms) {
-    text += text.empty() ? "" : " + ";
-    if (term.coefficient != 1.0) text += print_number(term.coefficient) + " ";
-    text += hypothesis.species[term.species].name;
-  }
-  return text;
-}
-
-std::string turnover(const core::Reaction& reaction, const Hypothesis& hypothesis) {
-  const std::string from = side(reaction.reactants, hypothesis);
-  const std::string to = side(reaction.products, hypothesis);
-  return from + (from.empty() ? "" : " ") + (reaction.reversible ? "<->" : "->") +
-         (to.empty() ? "" : " ") + to;
-}
-
 EquationSection derivatives(const Hypothesis& hypothesis) {
   EquationSection section{"Derivatives", {}, {}};
   const auto rates = core::balance_by_name(hypothesis);
@@ -86,7 +70,7 @@ EquationSection reactions(const Hypothesis& hypothesis) {
   EquationSection section{"Reactions", {}, {}};
   for (const auto& reaction : hypothesis.reactions)
     section.equations.push_back({Left::Name, reaction.name, core::net(reaction),
-                                 turnover(reaction, hypothesis),
+                                 equation_text(reaction, hypothesis),
                                  reaction.flow ? "amount per time" : ""});
   return section;
 }

@@ -1,5 +1,7 @@
 #include "gainsay/cli/reaction_equation.h"
 
+#include "gainsay/core/print.h"
+
 #include <algorithm>
 #include <array>
 #include <charconv>
@@ -156,6 +158,16 @@ core::Failure without_arrow(std::string_view text) {
   return failure;
 }
 
+std::string side_text(const std::vector<core::Term>& terms, const core::Hypothesis& hypothesis) {
+  std::string text;
+  for (const core::Term& term : terms) {
+    if (!text.empty()) text += " + ";
+    if (term.coefficient != 1.0) text += core::print_number(term.coefficient) + " ";
+    text += hypothesis.species[term.species].name;
+  }
+  return text;
+}
+
 }  // namespace
 
 core::Result<ReactionEquation> read_equation(std::string_view text) {
@@ -186,6 +198,13 @@ core::Expression mass_action_side(const std::vector<EquationPart>& side) {
     product = i == 0 ? factor : product * factor;
   }
   return product;
+}
+
+std::string equation_text(const core::Reaction& reaction, const core::Hypothesis& hypothesis) {
+  const std::string from = side_text(reaction.reactants, hypothesis);
+  const std::string to = side_text(reaction.products, hypothesis);
+  return from + (from.empty() ? "" : " ") + (reaction.reversible ? "<->" : "->") +
+         (to.empty() ? "" : " ") + to;
 }
 
 }  // namespace gainsay::cli

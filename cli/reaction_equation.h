@@ -1,6 +1,7 @@
 #pragma once
 
 #include "gainsay/core/expression.h"
+#include "gainsay/core/hypothesis.h"
 #include "gainsay/core/place.h"
 #include "gainsay/core/result.h"
 
@@ -32,5 +33,8 @@ core::Result<ReactionEquation> read_equation(std::string_view text);
 
 /// The product of a side's species with coefficients as powers; 1 for an empty side.
 core::Expression mass_action_side(const std::vector<EquationPart>& side);
+
+/// A reaction's equation as its author would write it: "2 A + B -> C", "A <-> B", "-> A".
+std::string equation_text(const core::Reaction& reaction, const core::Hypothesis& hypothesis);
 
 }  // namespace gainsay::cli

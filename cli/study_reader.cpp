@@ -1,5 +1,6 @@
 #include "gainsay/cli/study_reader.h"
 
+#include "gainsay/cli/beginning_check.h"
 #include "gainsay/cli/data_check.h"
 #include "gainsay/cli/experiment_files.h"
 #include "gainsay/cli/hypothesis_check.h"
@@ -131,6 +132,7 @@ StudyReading read_study(const std::filesystem::path& folder, ReadFor what_for) {
   }
   reading.places = places_of(parts);
   if (!diagnostics.has_errors()) {
+    warn_of_given_readings(parts, diagnostics);
     reading.study = make_study(folder, std::move(parts));
     try_assembly(*reading.study, diagnostics);
     if (diagnostics.has_errors()) reading.study.reset();
