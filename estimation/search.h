@@ -1,6 +1,7 @@
 #pragma once
 
 #include "gainsay/estimation/fit.h"
+#include "gainsay/estimation/optima.h"
 #include "gainsay/estimation/problem.h"
 
 #include <cstddef>
@@ -12,12 +13,6 @@
 #include <vector>
 
 namespace gainsay::estimation {
-
-/// Descents that ended alike: V within 0.01 and every prediction within 0.1 sd.
-struct Optimum {
-  std::size_t best_descent = 0;  ///< number in SearchResult::descents
-  std::size_t found = 0;         ///< how many random starts ended here
-};
 
 struct Descent {
   Fit fit;
@@ -36,7 +31,7 @@ struct SearchPlan {
 };
 
 /// Says, from all descents settled so far (in order of number), whether more random starts are
-/// needed: a rejection hangs on them. Asked after each descent.
+/// needed: a rejection hangs on them. Asked after each descent from `least_starts` on.
 using NeedsMore = std::function<bool(const Fit& best, std::size_t random_starts)>;
 
 struct SearchResult {
@@ -50,9 +45,14 @@ struct SearchResult {
   bool interrupted = false;
 };
 
+/// Told after each settled descent; `expected` is how many there will be if nothing changes.
 using SearchObserver = std::function<void(std::size_t done, std::size_t expected, double best_V)>;
 
-/// Many descents, on all threads; bit-identical for any number of them.
+/// Many descents, on all threads; bit-identical for any number of them: descents are numbered and
+/// settled in order of number, and every rule reads what is settled. Methods (46)-(49). First
+/// guesses come first (the middle of the box where there are none and no random start is wanted),
+/// then random starts. The descent with which the budget (times the number of experiments) is used
+/// up is the last one; an interruption keeps what is settled.
 SearchResult search(const Problem& problem, const SearchPlan& plan, const NeedsMore& needs_more,
                     const SearchObserver& observer = {});
 
