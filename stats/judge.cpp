@@ -8,6 +8,9 @@
 
 #include <algorithm>
 #include <cstdint>
+#include <optional>
+#include <utility>
+#include <vector>
 
 namespace gainsay::stats {
 namespace {
@@ -45,22 +48,27 @@ estimation::NeedsMore while_a_rejection_hangs_on_it(Examiner& examiner,
   };
 }
 
-/// The fit of the least V: from the best one, and from the other optima where the full limit would
-/// reject the hypothesis.
-Fit least_V_of(Examiner& examiner, const SearchResult& search, const Fit& fit) {
+/// The tests at `fit`; where the full limit, asked of the least V near it, would reject the
+/// hypothesis, the other optima are asked for a lower V, too.
+std::optional<Verdict> examined(Examiner& examiner, const SearchResult& search, const Fit& fit) {
   Fit least = examiner.least_V_from(fit);
+  std::optional<Verdict> verdict = examiner.examine(fit, least);
+  if (!verdict || verdict->decides != WhichLimit::Full || !verdict->full.passed()) return verdict;
+  const double near_fit = least.V;
   for (const estimation::Optimum& optimum : search.optima) {
     const Fit other = examiner.least_V_from(search.descents[optimum.best_descent].fit);
     if (other.V < least.V) least = other;
   }
-  return least;
+  return least.V < near_fit ? examiner.examine(fit, least) : verdict;
 }
 
 /// The lowest of the fits that did not converge, where it is below the best that did.
 const Fit* lower_without_convergence(const SearchResult& search) {
   const Fit* lowest = &search.best;
-  for (const estimation::Descent& descent : search.descents)
-    if (descent.fit.ended() && descent.fit.V < lowest->V) lowest = &descent.fit;
+  for (const estimation::Descent& descent : search.descents) {
+    const bool converged = descent.fit.stopped == estimation::Stopped::Converged;
+    if (!converged && descent.fit.ended() && descent.fit.V < lowest->V) lowest = &descent.fit;
+  }
   return lowest == &search.best ? nullptr : lowest;
 }
 
@@ -84,12 +92,15 @@ Trial tried(const Problem& problem, const JudgeOptions& options, const SearchPla
   trial.verdict.alpha = options.alpha;
   const Fit& best = trial.search.best;
   if (!best.ended()) return trial;
-  take(trial, best, examiner.examine(best, least_V_of(examiner, trial.search, best)));
+  take(trial, best, examined(examiner, trial.search, best));
 
   const Fit* lower = lower_without_convergence(trial.search);
   if (lower != nullptr && trial.verdict.V_speaks_against()) {
     std::optional<Verdict> verdict = examiner.examine(*lower, *lower);
-    if (verdict && !verdict->deciding_limit().passed()) take(trial, *lower, std::move(verdict));
+    if (verdict && !verdict->deciding_limit().passed()) {
+      take(trial, *lower, std::move(verdict));
+      trial.search.best = trial.fit;
+    }
   }
   return trial;
 }
@@ -103,20 +114,24 @@ Problem with_first_guess(Problem problem, const std::vector<double>& values) {
 void try_wider_ranges(const Problem& problem, const JudgeOptions& options,
                       const estimation::SearchObserver& observer, Trial& stated) {
   const long experiments = static_cast<long>(std::max<std::size_t>(problem.experiments.size(), 1));
+  Verdict& verdict = stated.verdict;
   SearchPlan plan = options.plan;
   plan.budget -= stated.search.integrations / experiments;
   Problem wider = problem;
   Fit fit = stated.fit;
-  for (int move = 0; move < kMostMoves && plan.budget > 0; ++move) {
+  for (int move = 0; move < kMostMoves; ++move) {
     const std::vector<Bound> bounds = movable_bounds(wider, fit.values, fit.on_bound);
     if (bounds.empty()) return;
+    verdict.range_untried = true;
+    if (plan.budget <= 0) return;
     wider = with_first_guess(moved_out(wider, bounds), fit.values);
     plan.seed += kFreshStarts;
     const Trial trial = tried(wider, options, plan, observer);
-    if (!trial.conviction.integrated || trial.conviction.interrupted) return;
-    stated.verdict.moved = moved_bounds(problem, wider, trial.verdict.V);
-    stated.verdict.only_within_range = !speaks_against(trial.verdict);
-    if (stated.verdict.only_within_range) return;
+    if (!trial.conviction.integrated) return;
+    verdict.moved = moved_bounds(problem, wider, trial.verdict.V);
+    verdict.only_within_range = !speaks_against(trial.verdict);
+    verdict.range_untried = !verdict.only_within_range && !trial.conviction.convincing();
+    if (verdict.only_within_range || verdict.range_untried) return;
     plan.budget -= trial.search.integrations / experiments;
     fit = trial.fit;
   }

@@ -17,7 +17,9 @@ struct JudgeOptions {
 };
 
 struct Judged {
-  estimation::SearchResult search;  ///< within the stated ranges
+  /// Within the stated ranges; its best fit is the one that the verdict is about. That is a fit
+  /// that did not converge only where none converged, or where it alone came below the limit.
+  estimation::SearchResult search;
   Verdict verdict;
 };
 

@@ -4,7 +4,9 @@
 
 #include <fmt/format.h>
 
+#include <string>
 #include <utility>
+#include <vector>
 
 namespace gainsay::stats {
 namespace {
@@ -38,27 +40,40 @@ std::string sentence_on_order(const Verdict& verdict) {
                      readable(verdict.order.T, 3), shown_P(verdict.order.p_value));
 }
 
-std::string sentence_on_range(const Verdict& verdict) {
+std::string moves(const Verdict& verdict) {
   std::vector<std::string> ends;
   for (const MovedBound& bound : verdict.moved)
     ends.push_back(fmt::format(
         "{} {} {} instead of {}", bound.unknown, bound.lower ? "down to" : "up to",
         readable(bound.moved_to, kDigitsOfRange), readable(bound.stated, kDigitsOfRange)));
-  const double V = verdict.moved.front().V;
+  return listed(ends);
+}
+
+std::string sentence_on_range(const Verdict& verdict) {
+  if (verdict.range_untried)
+    return "Its best fit lies on a bound, and the budget ended before that bound was moved out "
+           "and searched thoroughly: the rejection holds within the ranges searched.";
+  const std::string V = shown_V(verdict.moved.front().V);
   if (verdict.only_within_range)
     return fmt::format(
         "It is rejected only within the range of {}: searched {}, the misfit is {} and it would "
         "not be rejected.",
-        listed(moved_unknowns(verdict)), listed(ends), shown_V(V));
+        listed(moved_unknowns(verdict)), moves(verdict), V);
   return fmt::format("Its best fit lies on a bound; searched {}, it is still rejected (misfit {}).",
-                     listed(ends), shown_V(V));
+                     moves(verdict), V);
 }
 
-std::string sentence_on_search(const Conviction& conviction) {
+std::string sentence_on_search(const Verdict& verdict, const Conviction& conviction) {
+  const std::string chance = percent(chance_of_a_miss(conviction.random_starts));
+  if (!verdict.V_speaks_against())
+    return fmt::format(
+        "It is the best fit of {} random starts: with 95 % confidence another one would do better "
+        "with probability below {}.",
+        conviction.random_starts, chance);
   return fmt::format(
-      "None of {} random starts got further: with 95 % confidence another one would with "
+      "None of {} random starts came below the limit: with 95 % confidence another one would with "
       "probability below {}.",
-      conviction.random_starts, percent(chance_of_a_miss(conviction.random_starts)));
+      conviction.random_starts, chance);
 }
 
 std::string sentence_on_departure(const Verdict& verdict) {
@@ -137,8 +152,10 @@ std::vector<std::string> sentences_of(const Verdict& verdict, const Conviction& 
   if (verdict.decision == Decision::Undecided)
     sentences.push_back(sentence_undecided(verdict, conviction));
   if (verdict.N > verdict.k && conviction.integrated) add_tests(verdict, sentences);
-  if (verdict.decision == Decision::Rejected) sentences.push_back(sentence_on_search(conviction));
-  if (!verdict.moved.empty()) sentences.push_back(sentence_on_range(verdict));
+  if (verdict.decision == Decision::Rejected)
+    sentences.push_back(sentence_on_search(verdict, conviction));
+  if (!verdict.moved.empty() || verdict.range_untried)
+    sentences.push_back(sentence_on_range(verdict));
   if (verdict.decision == Decision::NotRejected && verdict.V_counts())
     sentences.push_back(sentence_on_departure(verdict));
   add_undetermined(verdict, sentences);

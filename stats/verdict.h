@@ -40,6 +40,7 @@ struct Verdict {
   std::string reason;                  ///< weightiest, short: one line of a table
   std::vector<std::string> sentences;  ///< why, in full sentences
   bool only_within_range = false;      ///< rejected, but not with the bounds of `moved` moved out
+  bool range_untried = false;          ///< the budget ended before they were searched thoroughly
 
   double V = kNotComputed;          ///< at the best fit; where sd is fitted, in units of that sd
   double V_tighter = kNotComputed;  ///< V of the deciding limit at tolerances 100 times tighter

@@ -31,14 +31,16 @@ TEST(Sentences, SayByHowMuchTheMisfitPassesAndWhereItComesFrom) {
       ElementsAre("The misfit 131.2 passes the reduced limit 88.57 (72 data, 5 free unknowns; P = "
                   "4.7e-6). The largest part of it comes from acid in run-01 (59 %).",
                   "The residuals scatter without order (lag-1 statistic 1.9, P = 0.43).",
-                  "None of 59 random starts got further: with 95 % confidence another one would "
-                  "with probability below 5 %."));
+                  "None of 59 random starts came below the limit: with 95 % confidence another one "
+                  "would with probability below 5 %."));
 }
 
 TEST(Sentences, PutOrderFirstWhereItRejects) {
   EXPECT_THAT(once_decided(drifting_verdict(), convinced())[0],
               "The residuals follow each other instead of scattering (lag-1 statistic 0.42, P = "
               "0.0001).");
+  EXPECT_THAT(once_decided(drifting_verdict(), convinced()),
+              Contains(StartsWith("It is the best fit of 59 random starts")));
 }
 
 TEST(Sentences, SayThatNotRejectedIsNotProven) {
@@ -78,6 +80,10 @@ TEST(Sentences, SayWhatHappensBeyondTheRange) {
   EXPECT_THAT(once_decided(verdict, convinced()),
               Contains("Its best fit lies on a bound; searched Km1 up to 1000 instead of 100, it "
                        "is still rejected (misfit 61.5)."));
+  verdict.range_untried = true;
+  EXPECT_THAT(once_decided(verdict, convinced()),
+              Contains(HasSubstr("the rejection holds within the ranges searched")));
+  verdict.range_untried = false;
   verdict.only_within_range = true;
   EXPECT_THAT(once_decided(verdict, convinced()),
               Contains("It is rejected only within the range of Km1: searched Km1 up to 1000 "
