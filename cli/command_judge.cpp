@@ -22,11 +22,14 @@ namespace gainsay::cli {
 namespace {
 
 constexpr std::size_t kWidth = 80;
-constexpr std::size_t kNameWidth = 24;
+constexpr std::size_t kNameWidth = 34;  // what 80 columns leave beside figures and the verdict
 
 std::string figure(double value, int digits) {
   return std::isfinite(value) ? fmt::format("{:.{}g}", value, digits) : "-";
 }
+
+/// A tail below the smallest double reads as a bound on it.
+std::string tail_figure(double p) { return p == 0.0 ? "<1e-300" : figure(p, 2); }
 
 const stats::Limit& deciding(const stats::Verdict& verdict) {
   return verdict.decides == stats::WhichLimit::Full ? verdict.full : verdict.reduced;
@@ -46,7 +49,7 @@ std::string row_of(const Study& study, const Outcome& outcome) {
   const std::string reason = harmless(verdict.reason);
   std::string line =
       row(hypothesis.letter, harmless(hypothesis.mechanism.title), figure(verdict.V, 4), limit,
-          figure(verdict.p_value, 2), word(verdict.decision));
+          tail_figure(verdict.p_value), word(verdict.decision));
   if (reason.empty()) return line + "\n";
   const std::string joined = line + ": " + reason;
   if (columns(joined) <= kWidth) return joined + "\n";
