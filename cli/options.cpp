@@ -135,7 +135,8 @@ Command laws_command() {
       .brief = "list the rate laws, or explain one",
       .description =
           "The rate laws that expressions may use: formula, arguments, where they hold, source.",
-      .options = {positional("NAME", "one law [all]"), json()},
+      .options = {positional("NAME", "one law [all]"), json(),
+                  flag("--markdown", "the page of all laws, as docs/rate-laws.md")},
       .examples = {{"gainsay laws", "every law in one line"},
                    {"gainsay laws michaelis_menten", "formula, arguments and source of one"}}};
 }
