@@ -48,7 +48,7 @@ class DataCheck {
       diagnostics_.warning(readout.place, {"no experiment has readings of '" + name + "'", "",
                                            "add readings, or remove the readout"});
     }
-    if (holdings.without_sd != nullptr && !readout.readout.noise.said()) {
+    if (holdings.without_sd != nullptr && !readout.says_noise) {
       diagnostics_.error(
           readout.place,
           {"how much '" + name + "' scatters is not said, but " + place_of(*holdings.without_sd) +
@@ -89,20 +89,24 @@ class DataCheck {
              ".csv, or name it by data = \"...\""});
   }
 
-  void check_any() {
+  // Whether there is anything to look at; says so if not.
+  bool has_data() {
     const bool has_any =
         std::any_of(parts_.experiments.begin(), parts_.experiments.end(),
                     [](const ExperimentReading& experiment) { return !experiment.series.empty(); });
     if (parts_.top.readouts.empty()) {
       ask(study(), {"the study has no readouts", "[readouts] in study.toml",
                     "add one, as readouts.glow = { shows = \"A\", noise = { sd = 0.1 } }"});
-    } else if (parts_.experiments.empty()) {
+    } else if (parts_.experiments.empty() && parts_.all_experiments_read) {
       ask(study(), {"the study has no experiments", "experiments/NAME.toml with NAME.csv",
                     "add at least one experiment"});
     } else if (!has_any && !some_table_is_wrong()) {
       ask(study(),
           {"no experiment has readings", "a table beside each experiment", "add readings"});
+    } else {
+      return true;
     }
+    return false;
   }
 
  private:
@@ -116,7 +120,8 @@ class DataCheck {
   }
 
   bool some_table_is_wrong() const {
-    return std::any_of(parts_.experiments.begin(), parts_.experiments.end(),
+    return !parts_.all_experiments_read ||
+           std::any_of(parts_.experiments.begin(), parts_.experiments.end(),
                        [](const ExperimentReading& one) { return one.table_is_wrong; });
   }
 
@@ -131,9 +136,9 @@ class DataCheck {
 
 void check_data(const StudyParts& parts, bool judging, Diagnostics& diagnostics) {
   DataCheck check(parts, judging, diagnostics);
+  if (!check.has_data()) return;
   for (std::size_t i = 0; i < parts.top.readouts.size(); ++i) check.check_readout(i);
   for (const ExperimentReading& experiment : parts.experiments) check.check_experiment(experiment);
-  check.check_any();
 }
 
 }  // namespace gainsay::cli

@@ -21,15 +21,15 @@ class ExperimentFiles {
                   Diagnostics& diagnostics)
       : files_(files), top_(top), knowns_(knowns), diagnostics_(diagnostics) {}
 
-  std::vector<ExperimentReading> read() && {
+  ReadExperiments read() && {
     for (const std::string& file : files_.list("experiments", ".toml")) read_document(file);
     for (const std::string& file : files_.list("experiments", ".csv")) {
       if (tables_.find(file) == tables_.end()) read_lone_table(file);
     }
-    std::stable_sort(readings_.begin(), readings_.end(), [](const auto& a, const auto& b) {
-      return a.experiment.name < b.experiment.name;
-    });
-    return std::move(readings_);
+    std::stable_sort(
+        read_.experiments.begin(), read_.experiments.end(),
+        [](const auto& a, const auto& b) { return a.experiment.name < b.experiment.name; });
+    return std::move(read_);
   }
 
  private:
@@ -41,14 +41,16 @@ class ExperimentFiles {
     const auto document = read_toml(source, diagnostics_);
     if (!document) {
       tables_[own_table] = file;  // else it would be taken for an experiment of its own
+      read_.all_read = false;
       return;
     }
     ExperimentReading reading =
-        read_experiment(*document, stem_of(file), whole(source), top_.inputs, diagnostics_);
+        read_experiment(*document, stem_of(file), whole(source), top_, diagnostics_);
     const bool is_named = !reading.data.empty();
     const std::string table = is_named ? StudyFiles::beside(file, reading.data) : own_table;
     if (is_named || files_.exists(table)) take_table(table, reading);
-    readings_.push_back(std::move(reading));
+    if (is_named && !files_.exists(table)) tables_[own_table] = file;  // said once
+    read_.experiments.push_back(std::move(reading));
   }
 
   // A table that no document names is an experiment of its own.
@@ -66,11 +68,11 @@ class ExperimentFiles {
     std::string why;
     const auto source = files_.read(file, why);
     if (source == nullptr) return say_unreadable(file, why);
-    reading = read_experiment(nothing, stem_of(file), whole(source), top_.inputs, diagnostics_);
-    const bool taken =
-        std::any_of(readings_.begin(), readings_.end(), [&](const ExperimentReading& other) {
-          return other.experiment.name == reading.experiment.name;
-        });
+    reading = read_experiment(nothing, stem_of(file), whole(source), top_, diagnostics_);
+    const bool taken = std::any_of(read_.experiments.begin(), read_.experiments.end(),
+                                   [&](const ExperimentReading& other) {
+                                     return other.experiment.name == reading.experiment.name;
+                                   });
     if (taken) {
       diagnostics_.error(whole(source),
                          {"the experiment '" + reading.experiment.name +
@@ -80,7 +82,7 @@ class ExperimentFiles {
       return;
     }
     take_table(file, reading);
-    readings_.push_back(std::move(reading));
+    read_.experiments.push_back(std::move(reading));
   }
 
   void take_table(const std::string& file, ExperimentReading& reading) {
@@ -111,7 +113,8 @@ class ExperimentFiles {
                   diagnostics_);
       return;
     }
-    if (const auto table = read_csv(source, diagnostics_)) {
+    const auto table = read_csv(source, diagnostics_);
+    if (table && top_.is_understood) {
       reading.series = read_table(*table, context(reading), diagnostics_);
     }
   }
@@ -122,6 +125,7 @@ class ExperimentFiles {
       context.readouts.push_back(readout.readout.name);
     for (const DeclaredInput& input : top_.inputs) context.inputs.push_back(input.name);
     context.knowns = knowns_;
+    for (const ReadKnown& known : reading.knowns) context.knowns.push_back(known.name);
     context.ignored = top_.ignored_columns;
     context.ignored.insert(context.ignored.end(), reading.ignored_columns.begin(),
                            reading.ignored_columns.end());
@@ -133,21 +137,21 @@ class ExperimentFiles {
     const auto missing = std::make_shared<const SourceText>(SourceText{file, ""});
     diagnostics_.error(whole(missing), {"the file cannot be used: " + why, "a file to read",
                                         "remove it, or allow reading it"});
+    read_.all_read = false;
   }
 
   StudyFiles& files_;
   const StudyTop& top_;
   const std::vector<std::string>& knowns_;
   Diagnostics& diagnostics_;
-  std::vector<ExperimentReading> readings_;
+  ReadExperiments read_;
   std::map<std::string, std::string> tables_;  // used so far, and by which file
 };
 
 }  // namespace
 
-std::vector<ExperimentReading> read_experiments(StudyFiles& files, const StudyTop& top,
-                                                const std::vector<std::string>& knowns,
-                                                Diagnostics& diagnostics) {
+ReadExperiments read_experiments(StudyFiles& files, const StudyTop& top,
+                                 const std::vector<std::string>& knowns, Diagnostics& diagnostics) {
   return ExperimentFiles(files, top, knowns, diagnostics).read();
 }
 

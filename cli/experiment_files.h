@@ -10,10 +10,15 @@
 
 namespace gainsay::cli {
 
+/// All experiments of a study that could be read.
+struct ReadExperiments {
+  std::vector<ExperimentReading> experiments;
+  bool all_read = true;  ///< false: some file could not be, so that a lack may not be one
+};
+
 /// Reads experiments/*.toml, each with its table, and tables that stand alone, in order of name.
 /// `knowns` are all names that some file gives as a known.
-std::vector<ExperimentReading> read_experiments(StudyFiles& files, const StudyTop& top,
-                                                const std::vector<std::string>& knowns,
-                                                Diagnostics& diagnostics);
+ReadExperiments read_experiments(StudyFiles& files, const StudyTop& top,
+                                 const std::vector<std::string>& knowns, Diagnostics& diagnostics);
 
 }  // namespace gainsay::cli

@@ -21,7 +21,7 @@ class ExperimentReader {
     experiment().name = name;
   }
 
-  ExperimentReading read(const std::vector<DeclaredInput>& inputs) && {
+  ExperimentReading read(const StudyTop& study) && {
     experiment().title = top_.text("title").value_or(experiment().name);
     experiment().begins = top_.number("begins").value_or(0.0);
     reading_.data = top_.text("data").value_or("");
@@ -30,8 +30,10 @@ class ExperimentReader {
     reading_.knowns = read_knowns(top_, kTop, diagnostics_);
     for (const ReadKnown& known : reading_.knowns) experiment().knowns[known.name] = known.value;
     read_starts();
-    experiment().inputs =
-        read_courses(top_, inputs, experiment().begins, reading_.file, diagnostics_);
+    if (study.is_understood) {
+      experiment().inputs =
+          read_courses(top_, study.inputs, experiment().begins, reading_.file, diagnostics_);
+    }
     read_doses();
     read_absent();
     return std::move(reading_);
@@ -80,10 +82,10 @@ class ExperimentReader {
             {"the dose is given before the experiment begins", "a time from the beginning on",
              "correct it; what is there at the beginning belongs under start"});
       }
-    } else if (!table.mentions("at")) {
+    } else if (table.lacks("at")) {
       diagnostics_.error(item.place, {"the dose has no time", "at = a time", "add at"});
     }
-    if (!table.mentions("add") && !table.mentions("raise")) {
+    if (table.lacks("add") && table.lacks("raise")) {
       diagnostics_.error(item.place, {"the dose adds nothing", "add = { ... } or raise = { ... }",
                                       "say what is added"});
     }
@@ -124,9 +126,9 @@ class ExperimentReader {
 }  // namespace
 
 ExperimentReading read_experiment(const TomlValue& document, const std::string& name,
-                                  const Location& file, const std::vector<DeclaredInput>& inputs,
+                                  const Location& file, const StudyTop& top,
                                   Diagnostics& diagnostics) {
-  return ExperimentReader(document, name, file, diagnostics).read(inputs);
+  return ExperimentReader(document, name, file, diagnostics).read(top);
 }
 
 }  // namespace gainsay::cli

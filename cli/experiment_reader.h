@@ -38,7 +38,7 @@ struct ExperimentReading {
 
 /// Reads an experiment's document. `name` is its stem.
 ExperimentReading read_experiment(const TomlValue& document, const std::string& name,
-                                  const Location& file, const std::vector<DeclaredInput>& inputs,
+                                  const Location& file, const StudyTop& top,
                                   Diagnostics& diagnostics);
 
 }  // namespace gainsay::cli

@@ -46,8 +46,8 @@ NameSpace gather_names(const HypothesisReading& reading, const StudyTop& top,
       } else if (taken->kind != NameKind::Known) {
         diagnostics.error(
             known.place,
-            {"'" + known.name + "' is a known here, but " + std::string(words_for(taken->kind)) +
-                 " in " + taken->place.file() + ":" + std::to_string(taken->place.line),
+            {"'" + known.name + "' is a known here, but " + with_a(taken->kind) + " in " +
+                 taken->place.file() + ":" + std::to_string(taken->place.line),
              "a name that is a known everywhere, or that only experiments give",
              "rename one of the two"});
       }
@@ -126,7 +126,7 @@ void check_leaning(const WrittenExpression& written, const core::Hypothesis& mec
     const DeclaredName* name = names.find(symbol);
     if (symbol != "t" && may_lean(written.leans, name)) continue;
     const std::string what =
-        name == nullptr ? "time" : std::string(words_for(name->kind)) + " '" + symbol + "'";
+        name == nullptr ? "time" : "the " + std::string(word_for(name->kind)) + " '" + symbol + "'";
     diagnostics.error(written.place, {written.role + " depends on " + what + where_else,
                                       of_beginning ? "knowns, unknowns and inputs at the beginning"
                                                    : "knowns and unknowns",

@@ -126,24 +126,28 @@ void require_distinct_titles(const std::vector<HypothesisReading>& readings,
 
 }  // namespace
 
-std::vector<HypothesisReading> read_hypotheses(StudyFiles& files, Diagnostics& diagnostics) {
+ReadHypotheses read_hypotheses(StudyFiles& files, Diagnostics& diagnostics) {
   Documents documents(files, diagnostics);
-  std::vector<HypothesisReading> readings;
+  ReadHypotheses read;
   std::size_t number = 0;
   for (const std::string& file : files.list("hypotheses", ".toml")) {
     if (is_base_only(file)) continue;
     const std::string letter = letter_of(number++);
     const auto document = documents.resolve(file);
-    if (!document) continue;
+    if (!document) {
+      read.all_read = false;
+      continue;
+    }
     std::string why;
-    readings.push_back(read_hypothesis(*document, whole(files.read(file, why)), diagnostics));
-    readings.back().hypothesis.letter = letter;
+    read.hypotheses.push_back(
+        read_hypothesis(*document, whole(files.read(file, why)), diagnostics));
+    read.hypotheses.back().hypothesis.letter = letter;
   }
-  for (HypothesisReading& reading : readings) {
-    reading.hypothesis.base = judged_base(reading.hypothesis.file, documents, readings);
+  for (HypothesisReading& reading : read.hypotheses) {
+    reading.hypothesis.base = judged_base(reading.hypothesis.file, documents, read.hypotheses);
   }
-  require_distinct_titles(readings, diagnostics);
-  return readings;
+  require_distinct_titles(read.hypotheses, diagnostics);
+  return read;
 }
 
 }  // namespace gainsay::cli

@@ -47,6 +47,11 @@ class HypothesisReader {
     reading_.names.push_back({name, kind, place});
   }
 
+  // What was said to be wrong still names something.
+  void declare_failed(const CheckedTable& names, NameKind kind) {
+    for (const TomlEntry* entry : names.failed()) declare(entry->key, kind, entry->place);
+  }
+
   // Reads a text or number of a table as an expression and keeps it for the check of names.
   std::optional<core::Expression> expression(const TomlValue& value, std::string role,
                                              Leans leans) {
@@ -70,6 +75,7 @@ class HypothesisReader {
     const auto names = inner_table(top_, "compartments", Section::Compartments, kTop, diagnostics_);
     if (names) {
       for (const TomlEntry* entry : names->entries()) read_compartment(*entry);
+      declare_failed(*names, NameKind::Compartment);
     }
     if (mechanism().compartments.empty()) mechanism().compartments.push_back({"", 1.0});
   }
@@ -95,6 +101,10 @@ class HypothesisReader {
     if (!names) return;
     for (const TomlEntry* entry : names->entries()) {
       if (is_usable_name(*entry, diagnostics_)) read_one_species(*entry);
+    }
+    declare_failed(*names, NameKind::Species);
+    for (const TomlEntry* entry : names->failed()) {
+      mechanism().species.emplace_back().name = entry->key;
     }
   }
 
@@ -154,6 +164,7 @@ class HypothesisReader {
       declare(entry->key, NameKind::Definition, entry->place);
       mechanism().definitions.push_back({entry->key, meaning.value_or(0.0)});
     }
+    declare_failed(*names, NameKind::Definition);
   }
 
   void read_reactions() {
@@ -165,6 +176,7 @@ class HypothesisReader {
       auto reaction = read_reaction(*entry, mechanism(), reading_.expressions, diagnostics_);
       if (reaction) mechanism().reactions.push_back(*std::move(reaction));
     }
+    declare_failed(*names, NameKind::Reaction);
   }
 
   CheckedTable top_;

@@ -32,6 +32,15 @@ std::vector<std::string> keys_of(Section section) {
   return names;
 }
 
+// What a value is that does not fit.
+std::string misfit_of(const TomlValue& value, unsigned takes) {
+  if (value.is_number() && !std::isfinite(value.number)) return "not finite";
+  if (value.is_number() && (takes & kWhole) != 0) return "no whole number from 0 up";
+  const bool takes_a_list = (takes & (kTexts | kNumbers | kPairs | kTables)) != 0;
+  if (value.is_list() && takes_a_list) return "a list of other things";
+  return std::string(words_for(value.kind));
+}
+
 std::string list_of(const std::vector<std::string>& names) {
   std::string list;
   for (const std::string& name : names) list += (list.empty() ? "" : ", ") + name;
@@ -63,7 +72,8 @@ CheckedTable::CheckedTable(const TomlValue& table, Section section, Section top,
                            Diagnostics& diagnostics)
     : table_(table), section_(section), top_(top) {
   for (const TomlEntry& entry : table.entries) {
-    if (passes(entry, diagnostics)) passed_.push_back(&entry);
+    (passes(entry, diagnostics) ? passed_ : failed_).push_back(&entry);
+    if (find_key(section, entry.key) == nullptr) has_unknown_keys_ = true;
   }
 }
 
@@ -76,12 +86,10 @@ bool CheckedTable::passes(const TomlEntry& entry, Diagnostics& diagnostics) cons
     return false;
   }
   if (fits(entry.value, key->takes)) return true;
-  std::string what = "'" + entry.key + "' is " + std::string(words_for(entry.value.kind));
-  if (entry.value.is_number() && !std::isfinite(entry.value.number)) {
-    what = "'" + entry.key + "' is not finite";
-  }
-  diagnostics.error(entry.value.place, {what, words_for_takes(key->takes),
-                                        "write it as: " + std::string(key->example)});
+  diagnostics.error(
+      entry.value.place,
+      {"'" + entry.key + "' is " + misfit_of(entry.value, key->takes), words_for_takes(key->takes),
+       "write it as, for example: " + std::string(key->example)});
   return false;
 }
 

@@ -24,6 +24,8 @@ class CheckedTable {
   bool has(std::string_view key) const { return entry(key) != nullptr; }
   /// Given at all, be it wrong or not yet accepted.
   bool mentions(std::string_view key) const { return table_.find(key) != nullptr; }
+  /// Not given, and not by a slip either: no key of the table is unknown.
+  bool lacks(std::string_view key) const { return !mentions(key) && !has_unknown_keys_; }
 
   std::optional<std::string> text(std::string_view key) const;
   std::optional<double> number(std::string_view key) const;
@@ -31,6 +33,8 @@ class CheckedTable {
 
   /// All entries that passed, in order of the text.
   const std::vector<const TomlEntry*>& entries() const { return passed_; }
+  /// Those that did not: what they name is still known to be named.
+  const std::vector<const TomlEntry*>& failed() const { return failed_; }
   const TomlValue& table() const { return table_; }
 
  private:
@@ -43,6 +47,8 @@ class CheckedTable {
   Section section_;
   Section top_;
   std::vector<const TomlEntry*> passed_;
+  std::vector<const TomlEntry*> failed_;
+  bool has_unknown_keys_ = false;
 };
 
 /// Whether a value is of one of these types.

@@ -6,24 +6,45 @@
 
 namespace gainsay::cli {
 
-std::string_view words_for(NameKind kind) {
+namespace {
+
+std::string_view what_may_stand(Leans leans) {
+  switch (leans) {
+    case Leans::OnConstants:
+      return "a known, an unknown or a function";
+    case Leans::OnTheBeginning:
+      return "a known, an unknown, an input or a function";
+    case Leans::OnAnything:
+      break;
+  }
+  return "a species, a reaction, an input, a known, an unknown, a name under [where] or a function";
+}
+
+}  // namespace
+
+std::string_view word_for(NameKind kind) {
   switch (kind) {
     case NameKind::Species:
-      return "a species";
+      return "species";
     case NameKind::Compartment:
-      return "a compartment";
+      return "compartment";
     case NameKind::Reaction:
-      return "a reaction";
+      return "reaction";
     case NameKind::Definition:
-      return "a name under [where]";
+      return "name under [where]";
     case NameKind::Known:
-      return "a known";
+      return "known";
     case NameKind::Unknown:
-      return "an unknown";
+      return "unknown";
     case NameKind::Input:
       break;
   }
-  return "an input";
+  return "input";
+}
+
+std::string with_a(NameKind kind) {
+  const bool vowel = kind == NameKind::Unknown || kind == NameKind::Input;
+  return (vowel ? "an " : "a ") + std::string(word_for(kind));
 }
 
 void NameSpace::declare(const DeclaredName& declared, Diagnostics& diagnostics) {
@@ -31,13 +52,12 @@ void NameSpace::declare(const DeclaredName& declared, Diagnostics& diagnostics) 
   if (is_new) return;
   const DeclaredName& first = taken->second;
   const std::string first_place = first.place.file() + ":" + std::to_string(first.place.line);
-  diagnostics.error(
-      declared.place,
-      {"the name '" + declared.name + "' is " + std::string(words_for(declared.kind)) +
-           " here and " + std::string(words_for(first.kind)) + " in " + first_place,
-       "one meaning for each name of species, compartments, reactions, [where], "
-       "knowns, unknowns and inputs",
-       "rename one of the two"});
+  diagnostics.error(declared.place,
+                    {"the name '" + declared.name + "' is " + with_a(declared.kind) + " here and " +
+                         with_a(first.kind) + " in " + first_place,
+                     "one meaning for each name of species, compartments, reactions, [where], "
+                     "knowns, unknowns and inputs",
+                     "rename one of the two"});
 }
 
 const DeclaredName* NameSpace::find(std::string_view name) const {
@@ -57,14 +77,14 @@ void check_names(const WrittenExpression& written, const NameSpace& known,
     if (known.holds(used.name)) continue;
     const std::vector<std::string> candidates = known.all();
     const auto nearest = core::nearest_name(used.name, candidates);
-    std::string expected =
-        "a species, a reaction, an input, a known, an unknown, a name under "
-        "[where] or a function";
+    std::string expected(what_may_stand(written.leans));
     if (nearest) expected += "; nearest known name: '" + *nearest + "'";
+    const bool anything = written.leans == Leans::OnAnything;
     diagnostics.error(
         used.place,
         {"unknown name '" + used.name + "' in " + written.role + where_else, expected,
-         "correct the name, or add '" + used.name + "' under [species], [where] or [unknowns]"});
+         "correct the name, or add '" + used.name + "' under " +
+             (anything ? "[species], [where] or [unknowns]" : "[knowns] or [unknowns]")});
   }
 }
 

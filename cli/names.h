@@ -19,8 +19,11 @@ struct DeclaredName {
   Location place;
 };
 
-/// "a species", "a name under [where]", ...
-std::string_view words_for(NameKind kind);
+/// "species", "name under [where]", ...
+std::string_view word_for(NameKind kind);
+
+/// The same with its article.
+std::string with_a(NameKind kind);
 
 /// The names that expressions of one hypothesis may use.
 class NameSpace {

@@ -41,7 +41,7 @@ class ReactionReader {
   bool read_equation_key() {
     const TomlValue* text = table_.value("equation");
     if (text == nullptr) {
-      if (!table_.mentions("equation")) {
+      if (table_.lacks("equation")) {
         diagnostics_.error(entry_.place,
                            {"the reaction '" + entry_.key + "' has no equation",
                             "equation = \"A -> B\"", "add it; an empty side is the outside"});
@@ -97,8 +97,7 @@ class ReactionReader {
            "rate (concentration per time) or flow (amount per time)", "remove one of the two"});
       return nullptr;
     }
-    if (rate == nullptr && flow == nullptr && !table_.mentions("rate") &&
-        !table_.mentions("flow")) {
+    if (rate == nullptr && flow == nullptr && table_.lacks("rate") && table_.lacks("flow")) {
       diagnostics_.error(
           entry_.place,
           {"the reaction '" + entry_.key + "' has neither rate nor flow",

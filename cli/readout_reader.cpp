@@ -116,7 +116,7 @@ ReadReadout read_readout(const TomlEntry& entry, Diagnostics& diagnostics) {
       readout.shows = written->expression;
       read.shows = *std::move(written);
     }
-  } else if (!table.mentions("shows")) {
+  } else if (table.lacks("shows")) {
     diagnostics.error(entry.place, {"the readout '" + entry.key + "' does not say what it shows",
                                     "shows = \"...\"", "add it, as shows = \"enzyme\""});
   }
@@ -128,6 +128,7 @@ ReadReadout read_readout(const TomlEntry& entry, Diagnostics& diagnostics) {
                       {"'signed' stands beside a scale that is a number",
                        "signed beside scale = \"unknown\"", "remove it; a number bears its sign"});
   }
+  read.says_noise = table.mentions("noise");
   if (const TomlValue* noise = table.value("noise"))
     readout.noise = read_noise(*noise, diagnostics);
   read.sd_of = one_of(table, "sd_of", {"reading", "mean"}, "\"reading\" or \"mean\"", diagnostics);

@@ -13,6 +13,7 @@ namespace gainsay::cli {
 struct ReadReadout {
   estimation::Readout readout;
   WrittenExpression shows;
+  bool says_noise = false;
   std::string sd_of;  ///< "reading", "mean", or empty where it is not said
   Location place;     ///< of its name
 };

@@ -119,7 +119,7 @@ bool is_used(const std::string& name, const StudyParts& parts) {
 void check_knowns(const StudyParts& parts, Diagnostics& diagnostics) {
   for (const ExperimentReading& experiment : parts.experiments) {
     for (const ReadKnown& known : experiment.knowns) {
-      if (is_used(known.name, parts)) continue;
+      if (!parts.all_names_known || is_used(known.name, parts)) continue;
       diagnostics.error(known.place,
                         {"nothing uses the known '" + known.name + "'",
                          "a known that some expression uses", "correct its name, or remove it"});
@@ -184,7 +184,7 @@ void check_parts(const StudyParts& parts, Diagnostics& diagnostics) {
     refuse_unknown_doses(experiment, parts, diagnostics);
   }
   check_knowns(parts, diagnostics);
-  warn_of_unused(parts, diagnostics);
+  if (!diagnostics.has_errors()) warn_of_unused(parts, diagnostics);
 }
 
 }  // namespace gainsay::cli

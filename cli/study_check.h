@@ -16,6 +16,8 @@ struct StudyParts {
   std::vector<HypothesisReading> hypotheses;
   std::vector<NameSpace> names;  ///< one for each hypothesis
   std::vector<ExperimentReading> experiments;
+  bool all_experiments_read = true;
+  bool all_names_known = true;  ///< no error in study.toml or a hypothesis hides a use of a name
 };
 
 /// Says what does not fit between the parts: names in readouts and experiments that hypotheses

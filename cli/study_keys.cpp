@@ -407,7 +407,8 @@ std::string words_for_takes(unsigned takes) {
   std::string words;
   for (const auto& [bit, word] : kWords) {
     if ((takes & bit) == 0) continue;
-    if (!words.empty()) words += " or ";
+    takes &= ~bit;
+    if (!words.empty()) words += takes == 0 ? " or " : ", ";
     words += word;
   }
   return words;

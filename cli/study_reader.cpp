@@ -106,6 +106,28 @@ std::vector<std::map<std::string, Location>> places_of(const StudyParts& parts) 
   return places;
 }
 
+void read_parts(StudyFiles& files, StudyParts& parts, ReadFor what_for, Diagnostics& diagnostics) {
+  ReadHypotheses read = read_hypotheses(files, diagnostics);
+  parts.hypotheses = std::move(read.hypotheses);
+  if (parts.hypotheses.empty() && read.all_read) {
+    diagnostics.error(parts.top.file,
+                      {"the study has no hypotheses", "at least one file hypotheses/NAME.toml",
+                       "add one; a file whose name begins with '_' is a base only"});
+  }
+  parts.all_names_known = !diagnostics.has_errors();
+  ReadExperiments runs = read_experiments(files, parts.top, names_of_knowns(parts), diagnostics);
+  parts.experiments = std::move(runs.experiments);
+  parts.all_experiments_read = runs.all_read;
+  if (!parts.top.is_understood) return;  // whatever names a file uses may stand in study.toml
+  const std::size_t errors = diagnostics.errors();
+  for (HypothesisReading& hypothesis : parts.hypotheses) {
+    parts.names.push_back(check_hypothesis(hypothesis, parts.top, parts.experiments, diagnostics));
+  }
+  if (diagnostics.errors() > errors) parts.all_names_known = false;
+  check_parts(parts, diagnostics);
+  check_data(parts, what_for == ReadFor::Judging, diagnostics);
+}
+
 }  // namespace
 
 StudyReading read_study(const std::filesystem::path& folder, ReadFor what_for) {
@@ -114,22 +136,7 @@ StudyReading read_study(const std::filesystem::path& folder, ReadFor what_for) {
   StudyReading reading;
   StudyParts parts;
   parts.top = read_top(files, diagnostics);
-  if (files.exists("study.toml")) {
-    const std::size_t files_with_syntax = diagnostics.errors();
-    parts.hypotheses = read_hypotheses(files, diagnostics);
-    if (parts.hypotheses.empty() && diagnostics.errors() == files_with_syntax) {
-      diagnostics.error(parts.top.file,
-                        {"the study has no hypotheses", "at least one file hypotheses/NAME.toml",
-                         "add one; a file whose name begins with '_' is a base only"});
-    }
-    parts.experiments = read_experiments(files, parts.top, names_of_knowns(parts), diagnostics);
-    for (HypothesisReading& hypothesis : parts.hypotheses) {
-      parts.names.push_back(
-          check_hypothesis(hypothesis, parts.top, parts.experiments, diagnostics));
-    }
-    check_parts(parts, diagnostics);
-    check_data(parts, what_for == ReadFor::Judging, diagnostics);
-  }
+  if (files.exists("study.toml")) read_parts(files, parts, what_for, diagnostics);
   reading.places = places_of(parts);
   if (!diagnostics.has_errors()) {
     warn_of_given_readings(parts, diagnostics);

@@ -44,6 +44,7 @@ std::vector<DeclaredInput> read_inputs(const CheckedTable& top, Diagnostics& dia
     const CheckedTable table(entry->value, Section::Input, kTop, diagnostics);
     inputs.push_back({entry->key, table.number("otherwise"), entry->place});
   }
+  for (const TomlEntry* entry : names->failed()) inputs.push_back({entry->key, 0.0, entry->place});
   return inputs;
 }
 
@@ -99,6 +100,7 @@ void read_accuracy(const CheckedTable& top, Study& study, Diagnostics& diagnosti
 StudyTop read_study_top(const TomlValue& document, const Location& file, Diagnostics& diagnostics) {
   StudyTop read;
   read.file = file;
+  read.is_understood = true;
   const CheckedTable top(document, kTop, kTop, diagnostics);
   read.study.title = top.text("title").value_or("");
   read_significance(top, read.study, diagnostics);

@@ -28,6 +28,7 @@ struct StudyTop {
   std::vector<ReadReadout> readouts;
   std::vector<std::string> ignored_columns;
   Location file;
+  bool is_understood = false;  ///< false: TOML could not be read, so nothing is known of its names
 };
 
 StudyTop read_study_top(const TomlValue& document, const Location& file, Diagnostics& diagnostics);

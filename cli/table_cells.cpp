@@ -34,13 +34,14 @@ bool has_decimal_comma(std::string text) {
 bool is_missing(const CsvCell& cell) { return cell.text.empty() || cell.text == "NA"; }
 
 std::optional<double> number_in(const CsvTable& table, const CsvCell& cell, std::string_view what,
-                                Diagnostics& diagnostics) {
+                                std::string_view of, Diagnostics& diagnostics) {
   const std::string_view text = cell.text;
   const Location at = table.at(cell);
+  const std::string named = "the " + std::string(what) + " '" + cell.text + "'" + std::string(of);
   if (const auto value = whole_number_text(text)) {
     if (std::isfinite(*value)) return value;
     diagnostics.error(
-        at, {"the " + std::string(what) + " '" + cell.text + "' is not finite",
+        at, {named + " is not finite",
              "a number a double can hold; empty or NA where there is none", "correct it"});
     return std::nullopt;
   }
@@ -52,11 +53,11 @@ std::optional<double> number_in(const CsvTable& table, const CsvCell& cell, std:
              whole_number_text(text.substr(0, text.size() - 1))) {
     say_not_yet(at, text, "give a time a little later", diagnostics);
   } else if (has_decimal_comma(cell.text)) {
-    diagnostics.error(at, {"the " + std::string(what) + " '" + cell.text + "' has a decimal comma",
-                           "a number with a point, as 0.5", "replace the comma by a point"});
+    diagnostics.error(at, {named + " has a decimal comma", "a number with a point, as 0.5",
+                           "replace the comma by a point"});
   } else {
-    diagnostics.error(at, {"the " + std::string(what) + " '" + cell.text + "' is no number",
-                           "a number; empty or NA where there is none", "correct it"});
+    diagnostics.error(
+        at, {named + " is no number", "a number; empty or NA where there is none", "correct it"});
   }
   return std::nullopt;
 }

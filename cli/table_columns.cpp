@@ -141,6 +141,11 @@ class ColumnReader {
       return error(column, {"a column has no header", "a header for each column",
                             "name the column, or remove it"});
     }
+    if (tidy_ && position(context_.readouts, name)) {
+      return error(column, {"'" + name + "' heads a column of its own in a tidy table",
+                            "its name in the column readout, its values in the column value",
+                            "write the table either tidy or with a column for each readout"});
+    }
     if (name.ends_with(')') || name.ends_with(']')) {
       return not_yet(column,
                      "head the column with the name alone; all numbers in one set of units");

@@ -25,6 +25,7 @@ class RowReader {
 
   std::vector<ReadSeries> read() && {
     for (const CsvRow& row : table_.rows) {
+      if (std::all_of(row.begin(), row.end(), is_missing)) continue;
       if (columns_.is_tidy()) {
         read_tidy(row);
       } else {
@@ -63,7 +64,7 @@ class RowReader {
                                            "give the time, or remove the row"});
       return std::nullopt;
     }
-    const auto time = number_in(table_, cell, "time", diagnostics_);
+    const auto time = number_in(table_, cell, "time", "", diagnostics_);
     if (time && *time < context_.begins) {
       diagnostics_.error(table_.at(cell),
                          {"the time " + cell.text + " is before the experiment begins, at " +
@@ -93,7 +94,7 @@ class RowReader {
     const CsvCell& cell = row[value_column];
     if (is_missing(cell)) return;
     const std::string of = " of '" + context_.readouts[readout] + "'";
-    const auto value = number_in(table_, cell, "value" + of, diagnostics_);
+    const auto value = number_in(table_, cell, "value", of, diagnostics_);
     if (!value) return;
     estimation::Point point;
     point.time = time;
@@ -106,7 +107,7 @@ class RowReader {
 
   void read_sd(const CsvCell& cell, const std::string& of, estimation::Point& point) {
     if (is_missing(cell)) return;
-    const auto sd = number_in(table_, cell, "sd" + of, diagnostics_);
+    const auto sd = number_in(table_, cell, "sd", of, diagnostics_);
     if (!sd) return;
     point.sd = *sd;
     if (*sd > 0.0) return;

@@ -28,14 +28,6 @@ std::string_view key_part(std::string_view line) {
   return trimmed(line.substr(0, std::min(line.find('='), line.size())));
 }
 
-// What stands behind the first '=' of a line, without a comment.
-std::string_view value_part(std::string_view line) {
-  const std::size_t equals = line.find('=');
-  if (equals == std::string_view::npos) return {};
-  const std::string_view rest = line.substr(equals + 1);
-  return trimmed(rest.substr(0, std::min(rest.find('#'), rest.size())));
-}
-
 // The text between the first pair of single quotes in the parser's words.
 std::string_view quoted(std::string_view description) {
   const std::size_t begin = description.find('\'');
@@ -78,19 +70,20 @@ std::optional<Message> key_without_quotes(std::string_view line, std::string_vie
                  "and shown_as says what pages print"};
 }
 
-std::optional<Message> value_without_quotes(std::string_view line, std::string_view description) {
-  const std::string_view value = value_part(line);
+// `rest` is the line from the place of the error on.
+std::optional<Message> value_without_quotes(std::string_view rest, std::string_view description) {
   const bool no_type = contains(description, "could not determine value type");
   const bool not_true = contains(description, "parsing boolean");
-  if (contains(value, "\xE2\x80\x9C") || contains(value, "\xE2\x80\x9D")) {
+  if (!no_type && !not_true) return std::nullopt;
+  if (rest.starts_with("\xE2\x80\x9C") || rest.starts_with("\xE2\x80\x9D")) {
     return Message{"a text stands in typographic quotes", "plain quotes: \"",
                    "replace the quotes by \""};
   }
-  if (not_true && (value == "True" || value == "False" || value == "TRUE" || value == "FALSE")) {
-    return Message{"'" + std::string(value) + "' is no value", "true or false, in small letters",
+  const std::string word(rest.substr(0, rest.find_first_of(" \t,]}#")));
+  if (word == "True" || word == "False" || word == "TRUE" || word == "FALSE") {
+    return Message{"'" + word + "' is no value", "true or false, in small letters",
                    "write it in small letters"};
   }
-  if (!no_type && !not_true) return std::nullopt;
   return Message{"this value is neither a number nor a text in quotes",
                  "a number, true, false, \"text\", [list] or { table }",
                  "put a text or an expression in quotes: \"k1 * A\""};
@@ -129,15 +122,29 @@ std::optional<Message> number_form(std::string_view description) {
                  "write 0.5 for .5, 5.0 for 5. and 7 for 07"};
 }
 
-std::optional<Message> open_string(std::string_view description) {
+std::optional<Message> open_string(std::string_view rest, std::string_view description) {
   if (!contains(description, "parsing string")) return std::nullopt;
-  if (contains(description, "escape")) {
+  if (contains(description, "escape sequence")) {
     return Message{"a backslash in \"...\" does not begin an escape that TOML has",
                    "\\n, \\t, \\\", \\\\ or \\u with four digits",
                    "write '...' with single quotes, which know no escapes"};
   }
+  if (contains(description, "control characters") && !rest.empty()) {
+    return Message{"a control character stands in a text", "characters that can be seen",
+                   "remove it, or write it as \\u with four digits"};
+  }
   return Message{"a text is not closed", "a closing quote on the same line",
                  "close the quote; a text over several lines stands between \"\"\" and \"\"\""};
+}
+
+std::optional<Message> open_bracket(std::string_view description) {
+  const bool list = contains(description, "parsing array");
+  const bool header =
+      contains(description, "table header") && contains(description, "expected ']'");
+  if (!list && !header) return std::nullopt;
+  return Message{list ? "a list is not closed, or lacks a comma" : "a header is not closed",
+                 list ? "',' or ']'" : "']'",
+                 list ? "write it as [0.01, 10]" : "write it as [unknowns]"};
 }
 
 // The parser's own words, cut at "expected".
@@ -160,14 +167,18 @@ Message in_other_cases(std::string_view description) {
 }  // namespace
 
 Message explain_syntax_error(const Location& at, std::string_view description) {
-  const std::string_view line = at.source ? line_of(at.source->bytes, at.line) : std::string_view();
+  const std::string_view bytes = at.source ? std::string_view(at.source->bytes) : "";
+  const std::string_view line = line_of(bytes, at.line);
+  const std::string_view from_here = bytes.substr(offset_of(bytes, at.line, at.column));
+  const std::string_view rest = from_here.substr(0, from_here.find_first_of("\r\n"));
   if (contains(description, "invalid utf-8")) {
     return {"the file is not UTF-8 here", "text in UTF-8", "save the file as UTF-8"};
   }
   for (std::optional<Message> message :
        {inline_table(description), key_without_quotes(line, description),
-        value_without_quotes(line, description), more_behind_value(line, description),
-        stands_twice(description), number_form(description), open_string(description)}) {
+        value_without_quotes(rest, description), more_behind_value(line, description),
+        stands_twice(description), number_form(description), open_string(rest, description),
+        open_bracket(description)}) {
     if (message) return *std::move(message);
   }
   return in_other_cases(description);

@@ -88,7 +88,7 @@ void read_per(const CheckedTable& table, estimation::DeclaredUnknown& declared,
 void read_table(const TomlValue& value, Section top, estimation::DeclaredUnknown& declared,
                 Diagnostics& diagnostics) {
   const CheckedTable table(value, Section::Unknown, top, diagnostics);
-  if (!table.mentions("between")) {
+  if (table.lacks("between")) {
     diagnostics.error(value.place, {"the unknown has no range", "between = [lower, upper]",
                                     "add between; a number that is given belongs under [knowns]"});
   }
@@ -141,11 +141,14 @@ std::vector<ReadKnown> read_knowns(const CheckedTable& outer, Section top,
       knowns.push_back({entry->key, *value, entry->place});
       continue;
     }
-    if (!table.mentions("value")) {
+    if (table.lacks("value")) {
       diagnostics.error(entry->value.place, {"the known '" + entry->key + "' has no value",
                                              "value = a number", "add value"});
     }
     knowns.push_back({entry->key, 0.0, entry->place});  // so that its name stays known
+  }
+  for (const TomlEntry* entry : names->failed()) {
+    knowns.push_back({entry->key, 0.0, entry->place});
   }
   return knowns;
 }
@@ -166,6 +169,10 @@ std::vector<ReadUnknown> read_unknowns(const CheckedTable& outer, Section top,
       read_table(entry->value, top, read.declared, diagnostics);
     }
     unknowns.push_back(std::move(read));  // with an error, too: its name stays known
+  }
+  for (const TomlEntry* entry : names->failed()) {
+    unknowns.emplace_back().place = entry->place;
+    unknowns.back().declared.unknown.name = entry->key;
   }
   return unknowns;
 }
