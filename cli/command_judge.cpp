@@ -47,9 +47,9 @@ std::string row_of(const Study& study, const Outcome& outcome) {
   const StudyHypothesis& hypothesis = study.hypotheses[outcome.hypothesis];
   const std::string limit = verdict.noise_unknown ? "-" : figure(deciding(verdict).value, 4);
   const std::string reason = harmless(verdict.reason);
-  std::string line =
-      row(hypothesis.letter, harmless(hypothesis.mechanism.title), figure(verdict.V, 4), limit,
-          tail_figure(verdict.p_value), word(verdict.decision));
+  std::string line = row(hypothesis.letter, harmless(hypothesis.mechanism.title),
+                         verdict.noise_unknown ? "-" : figure(verdict.V, 4), limit,
+                         tail_figure(verdict.p_value), word(verdict.decision));
   if (reason.empty()) return line + "\n";
   const std::string joined = line + ": " + reason;
   if (columns(joined) <= kWidth) return joined + "\n";

@@ -1,6 +1,7 @@
 #include "gainsay/cli/command_check.h"
 #include "gainsay/cli/command_equations.h"
 #include "gainsay/cli/command_judge.h"
+#include "gainsay/cli/command_laws.h"
 #include "gainsay/cli/command_line.h"
 #include "gainsay/cli/command_new.h"
 #include "gainsay/cli/command_simulate.h"
@@ -68,6 +69,9 @@ int run(const Invocation& given, const Console& console) {
     if (given.command == "check") {
       return run_check({.study = study_of(given), .json = given.has("--json")}, console);
     }
+  if (given.command == "laws") {
+    return run_laws({.name = given.text("NAME"), .json = given.has("--json")}, console);
+  }
   if (given.command == "new")
     return run_new({.folder = given.text("FOLDER").value_or("")}, console);
   if (given.command == "equations") return equations(given, console);
