@@ -5,6 +5,8 @@
 #include "gainsay/core/rate_laws.h"
 #include "gainsay/core/tokens.h"
 
+#include <fmt/format.h>
+
 #include <algorithm>
 #include <array>
 #include <cctype>
@@ -38,7 +40,7 @@ const OtherFunction* find_other_function(std::string_view name) {
   return found == kOtherFunctions.end() ? nullptr : &*found;
 }
 
-std::string quoted(std::string_view text) { return "'" + std::string(text) + "'"; }
+std::string quoted(std::string_view text) { return fmt::format("'{}'", text); }
 
 std::string joined(const std::vector<std::string>& words) {
   std::string text;
@@ -162,7 +164,7 @@ class Parser {
     if (const NamedConstant* constant = find_constant(token.text)) return constant->value;
     if (const OtherFunction* other = find_other_function(token.text)) stop_at(*other, token);
     if (const std::string arguments = arguments_of(token.text); !arguments.empty()) {
-      const std::string call = std::string(token.text) + "(" + arguments + ")";
+      const std::string call = fmt::format("{}({})", token.text, arguments);
       stop(quoted(token.text) + " is a function", call, "give its arguments in brackets", token);
     }
     names_.push_back({std::string(token.text), token.place});
@@ -233,15 +235,15 @@ class Parser {
 
   [[noreturn]] void stop_at_count(const Token& name, const std::string& takes,
                                   std::size_t given) const {
-    stop(quoted(name.text) + " takes " + takes + (takes == "1" ? " argument" : " arguments") +
-             ", not " + std::to_string(given),
-         std::string(name.text) + "(" + arguments_of(name.text) + ")",
+    stop(fmt::format("'{}' takes {} argument{}, not {}", name.text, takes, takes == "1" ? "" : "s",
+                     given),
+         fmt::format("{}({})", name.text, arguments_of(name.text)),
          "give one for each, in this order", name);
   }
 
   [[noreturn]] void stop_at_unknown_function(const Token& name) const {
     if (const OtherFunction* other = find_other_function(name.text)) stop_at(*other, name);
-    const std::string product = "write '" + std::string(name.text) + " * (' if a product is meant";
+    const std::string product = fmt::format("write '{} * (' if a product is meant", name.text);
     if (name.text == "t" || find_constant(name.text) != nullptr) {
       stop(quoted(name.text) + " is no function", "a sign between it and the bracket", product,
            name);
@@ -274,9 +276,9 @@ class Parser {
     if (is_word_sign(word) && word != token.text) {
       stop("unknown sign " + quoted(token.text), quoted(word), "write it in small letters", token);
     }
-    const std::string between = std::string(before.text) + " * " + std::string(token.text);
+    const std::string between = fmt::format("{} * {}", before.text, token.text);
     stop("a sign is missing before " + quoted(token.text), "a sign such as + or *",
-         "write '" + between + "' if a product is meant", token);
+         fmt::format("write '{}' if a product is meant", between), token);
   }
 
   std::vector<Token> tokens_;
