@@ -77,6 +77,9 @@ std::string sentence_on_search(const Verdict& verdict, const Conviction& convict
 }
 
 std::string sentence_on_departure(const Verdict& verdict) {
+  if (!verdict.V_counts())
+    return "Not rejected is not proven: a wrong curve without order, or one drowned in noise, "
+           "would have gone unseen.";
   return fmt::format(
       "Not rejected is not proven: all {} off by less than {} sd may have gone unseen (so much is "
       "caught nine times in ten).",
@@ -156,7 +159,7 @@ std::vector<std::string> sentences_of(const Verdict& verdict, const Conviction& 
     sentences.push_back(sentence_on_search(verdict, conviction));
   if (!verdict.moved.empty() || verdict.range_untried)
     sentences.push_back(sentence_on_range(verdict));
-  if (verdict.decision == Decision::NotRejected && verdict.V_counts())
+  if (verdict.decision == Decision::NotRejected)
     sentences.push_back(sentence_on_departure(verdict));
   add_undetermined(verdict, sentences);
   return sentences;

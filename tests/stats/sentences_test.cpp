@@ -56,6 +56,7 @@ TEST(Sentences, OfUnknownNoiseSayThatOrderAloneIsJudged) {
   EXPECT_THAT(sentences,
               Contains(HasSubstr("order is judged alone, with all of the significance")));
   EXPECT_THAT(sentences, Not(Contains(HasSubstr("limit"))));
+  EXPECT_THAT(sentences, Contains(StartsWith("Not rejected is not proven: a wrong curve")));
 }
 
 TEST(Sentences, SayWhyOrderIsNotJudged) {
