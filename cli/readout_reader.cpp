@@ -1,5 +1,6 @@
 #include "gainsay/cli/readout_reader.h"
 
+#include <algorithm>
 #include <optional>
 #include <utility>
 
@@ -12,6 +13,7 @@ using estimation::Coefficient;
 constexpr std::string_view kUnknown = "unknown";
 constexpr std::string_view kUnknownPer = "unknown per ";
 constexpr std::string_view kPerExperiment = "unknown per experiment";
+constexpr std::string_view kSameAs = "same as ";
 
 // A scale or an offset: a number, "unknown", "unknown per experiment".
 Coefficient read_coefficient(const CheckedTable& table, std::string_view key, double otherwise,
@@ -43,37 +45,56 @@ Coefficient read_coefficient(const CheckedTable& table, std::string_view key, do
   return coefficient;
 }
 
-// A part of the noise: a number from 0 up; "unknown" for sd alone.
-void read_part(const CheckedTable& table, std::string_view key, std::optional<double>& part,
-               bool& unknown, Diagnostics& diagnostics) {
-  const TomlValue* value = table.value(key);
-  if (value == nullptr) return;
-  if (value->is_number()) {
-    part = value->number;
-    if (value->number >= 0.0) return;
-    diagnostics.error(value->place, {"'" + std::string(key) + "' of the noise is negative",
-                                     "a number from 0 up", "correct it"});
-    return;
+// A part of the noise as a number from 0 up; false where it is given in words.
+bool read_number(const TomlValue& value, std::string_view key, std::optional<double>& part,
+                 Diagnostics& diagnostics) {
+  if (!value.is_number()) return false;
+  part = value.number;
+  if (value.number < 0.0) {
+    diagnostics.error(value.place, {"'" + std::string(key) + "' of the noise is negative",
+                                    "a number from 0 up", "correct it"});
   }
-  if (value->text == kUnknown && key == "sd") {
-    unknown = true;
-  } else if (value->text == kUnknown || value->text == "from replicates") {
-    say_not_yet(value->place, std::string(key) + " = \"" + value->text + "\"",
+  return true;
+}
+
+void refuse_words(const TomlValue& value, std::string_view key, std::string_view expected,
+                  Diagnostics& diagnostics) {
+  if (value.text == kUnknown || value.text == "from replicates") {
+    say_not_yet(value.place, std::string(key) + " = \"" + value.text + "\"",
                 "give a number, or an sd column; sd = \"unknown\" stands alone", diagnostics);
   } else {
-    diagnostics.error(value->place,
-                      {"'" + value->text + "' is no " + std::string(key) + " of the noise",
-                       key == "sd" ? "a number or \"unknown\"" : "a number", "correct it"});
+    diagnostics.error(value.place,
+                      {"'" + value.text + "' is no " + std::string(key) + " of the noise",
+                       std::string(expected), "correct it"});
   }
+}
+
+// A number, "unknown", or "same as NAME": the unknown sd of another readout.
+void read_sd(const CheckedTable& table, estimation::Noise& noise, Diagnostics& diagnostics) {
+  const TomlValue* value = table.value("sd");
+  if (value == nullptr || read_number(*value, "sd", noise.sd, diagnostics)) return;
+  if (value->text == kUnknown) {
+    noise.sd_unknown = true;
+  } else if (value->text.starts_with(kSameAs)) {
+    noise.sd_unknown = true;
+    noise.same_as = value->text.substr(kSameAs.size());
+  } else {
+    refuse_words(*value, "sd", "a number, \"unknown\", or \"same as\" and a readout", diagnostics);
+  }
+}
+
+void read_relative(const CheckedTable& table, estimation::Noise& noise, Diagnostics& diagnostics) {
+  const TomlValue* value = table.value("relative");
+  if (value == nullptr || read_number(*value, "relative", noise.relative, diagnostics)) return;
+  refuse_words(*value, "relative", "a number", diagnostics);
 }
 
 estimation::Noise read_noise(const TomlValue& value, Diagnostics& diagnostics) {
   const CheckedTable table(value, Section::Noise, Section::Study, diagnostics);
   estimation::Noise noise;
-  bool none = false;
   const std::size_t errors = diagnostics.errors();
-  read_part(table, "sd", noise.sd, noise.sd_unknown, diagnostics);
-  read_part(table, "relative", noise.relative, none, diagnostics);
+  read_sd(table, noise, diagnostics);
+  read_relative(table, noise, diagnostics);
   if (diagnostics.errors() > errors || table.entries().size() < value.entries.size()) return noise;
   if (noise.sd_unknown && noise.relative) {
     say_not_yet(table.entry("relative")->place, "relative beside sd = \"unknown\"",
@@ -137,6 +158,24 @@ ReadReadout read_readout(const TomlEntry& entry, Diagnostics& diagnostics) {
   return read;
 }
 
+// The readout whose unknown sd another shares must have one of its own.
+void check_shared_noise(const std::vector<ReadReadout>& readouts, Diagnostics& diagnostics) {
+  for (const ReadReadout& read : readouts) {
+    const std::string& owner = read.readout.noise.same_as;
+    if (owner.empty()) continue;
+    const auto found = std::ranges::find_if(
+        readouts, [&](const ReadReadout& other) { return other.readout.name == owner; });
+    const bool usable = found != readouts.end() && found->readout.noise.sd_unknown &&
+                        found->readout.noise.same_as.empty();
+    if (usable) continue;
+    diagnostics.error(read.place,
+                      {"the noise of '" + read.readout.name + "' is the same as that of '" + owner +
+                           "', which has no unknown sd of its own",
+                       "a readout with noise = { sd = \"unknown\" }",
+                       "correct the name, or give '" + owner + "' that noise"});
+  }
+}
+
 }  // namespace
 
 std::vector<ReadReadout> read_readouts(const CheckedTable& top, Diagnostics& diagnostics) {
@@ -150,6 +189,7 @@ std::vector<ReadReadout> read_readouts(const CheckedTable& top, Diagnostics& dia
     }
     readouts.push_back(read_readout(*entry, diagnostics));
   }
+  check_shared_noise(readouts, diagnostics);
   return readouts;
 }
 

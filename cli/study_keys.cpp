@@ -172,7 +172,8 @@ constexpr std::array kStudyKeys = {
 
     StudyKey{Section::Noise, "sd", kExpression, Section::None, "of the readout", "0", "sd = 0.05",
              R"(standard deviation, the same for all values; or "unknown", fitted, and then )"
-             R"(alone; "from replicates" not yet)"},
+             R"(alone; or "same as glow", the unknown one of that readout; "from replicates" )"
+             R"(not yet)"},
     StudyKey{Section::Noise, "relative", kExpression, Section::None, "", "0", "relative = 0.03",
              "part of the modelled value: variance = sd^2 + (relative * value)^2"},
     StudyKey{Section::Noise, "counting", kExpression, Section::None, "of the readout", "",
