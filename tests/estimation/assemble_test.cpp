@@ -126,6 +126,16 @@ TEST_F(AssembleTest, UnknownSdsAreGroupedByReadout) {
   EXPECT_EQ(problem.experiments[1].series[0].noise_group, 0U);
 }
 
+TEST_F(AssembleTest, ReadoutsMayShareOneUnknownSd) {
+  for (auto& readout : readouts_)
+    readout.noise = Noise{.sd = {}, .relative = {}, .sd_unknown = true};
+  readouts_[0].noise.same_as = "rate";
+  const Problem problem = assembled();
+  EXPECT_THAT(problem.noise_groups, ElementsAre("rate"));
+  EXPECT_EQ(problem.experiments[0].series[0].noise_group, 0U);
+  EXPECT_EQ(problem.experiments[0].series[1].noise_group, 0U);
+}
+
 TEST_F(AssembleTest, PointsWithSdsLeaveNoUnknownNoise) {
   for (auto& readout : readouts_)
     readout.noise = Noise{.sd = {}, .relative = {}, .sd_unknown = true};
