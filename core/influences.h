@@ -23,7 +23,7 @@ struct Influence {
 
 /// The sign of the derivative of `rate` (written out) by a symbol, found at sampled positive points
 /// (knowns at their values); none where it is zero at all of them. With `either_way` a negative
-/// rate is the way back, and what matters is whether its size rises.
+/// rate is the way back, and what matters is whether its size rises. Methods (7).
 std::optional<Sign> effect(const Expression& rate, std::string_view symbol,
                            const Hypothesis& hypothesis, bool either_way);
 

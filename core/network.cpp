@@ -74,7 +74,7 @@ std::vector<ConservedSum> conserved_sums(const Eigen::MatrixXd& S, const Hypothe
   return sums;
 }
 
-/// Whether `rate` (written out) can have the sign at species = 0, all else positive.
+/// Whether `rate` (written out) can have the sign at species = 0, all else positive. Methods (8).
 bool goes_on_without(const std::string& species, double sign, const Expression& rate,
                      const Hypothesis& hypothesis) {
   constexpr std::uint64_t kPoints = 24;

@@ -32,7 +32,7 @@ double expected_value(const Unknown& unknown);
 
 /// The absolute tolerance of each state: the species' own `negligible`, else `negligible` times the
 /// largest start, addition or reading of its kind (1 if there is none but 0). Unknowns in starts
-/// and additions are taken at their expected values.
+/// and additions are taken at their expected values. Methods (9).
 std::vector<double> absolute_tolerances(const core::Hypothesis& hypothesis,
                                         const core::System& system,
                                         std::span<const Unknown> unknowns,
