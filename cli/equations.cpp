@@ -61,7 +61,7 @@ EquationSection derivatives(const Hypothesis& hypothesis) {
     const core::Species& species = hypothesis.species[i];
     std::string words = species.held ? "held by the experimenter" : "";
     if (species.amount) words += words.empty() ? "an amount" : "; an amount";
-    section.equations.push_back({Left::Derivative, species.name, rates[i], "", words});
+    section.equations.push_back({Left::Derivative, species.name, rates[i], std::nullopt, words});
   }
   return section;
 }
@@ -70,7 +70,7 @@ EquationSection reactions(const Hypothesis& hypothesis) {
   EquationSection section{"Reactions", {}, {}};
   for (const auto& reaction : hypothesis.reactions)
     section.equations.push_back({Left::Name, reaction.name, core::net(reaction),
-                                 equation_text(reaction, hypothesis),
+                                 equation_of(reaction, hypothesis),
                                  reaction.flow ? "amount per time" : ""});
   return section;
 }
@@ -79,9 +79,11 @@ EquationSection definitions(const Hypothesis& hypothesis) {
   EquationSection section{"Where", {}, {}};
   for (const auto& compartment : hypothesis.compartments)
     if (!compartment.volume.is_number(1.0))
-      section.equations.push_back({Left::Name, compartment.name, compartment.volume, "", "volume"});
+      section.equations.push_back(
+          {Left::Name, compartment.name, compartment.volume, std::nullopt, "volume"});
   for (const auto& definition : hypothesis.definitions)
-    section.equations.push_back({Left::Name, definition.name, definition.meaning, "", ""});
+    section.equations.push_back(
+        {Left::Name, definition.name, definition.meaning, std::nullopt, ""});
   return section;
 }
 
@@ -102,7 +104,7 @@ EquationSection starts(const Study& study, const Hypothesis& hypothesis) {
         study.experiments, [&](const auto& experiment) { return start_in(experiment, species); });
     if (groups.empty()) groups.push_back({species.start, {}});
     for (const auto& group : groups)
-      section.equations.push_back({Left::AtBeginning, species.name, group.value, "",
+      section.equations.push_back({Left::AtBeginning, species.name, group.value, std::nullopt,
                                    in_experiments(group.experiments, study)});
   }
   return section;
@@ -121,7 +123,7 @@ EquationSection additions(const Study& study, const Hypothesis& hypothesis) {
     const bool same_unit = is_amount == species.amount || compartment.volume.is_number(1.0);
     const Expression rise = same_unit ? size : is_amount ? size / volume : size * volume;
     section.equations.push_back(
-        {Left::Rise, name, rise, "",
+        {Left::Rise, name, rise, std::nullopt,
          fmt::format("at t = {} in {}", print_number(at), experiment.name)});
   };
   for (const auto& experiment : study.experiments)
@@ -145,8 +147,8 @@ EquationSection measurements(const Study& study) {
   EquationSection section{"Measurement equations", {}, {}};
   for (const auto& readout : study.readouts)
     section.equations.push_back({Left::OverTime, readout.name,
-                                 estimation::measurement(readout, readout.shows, "experiment"), "",
-                                 noise_words(readout.noise)});
+                                 estimation::measurement(readout, readout.shows, "experiment"),
+                                 std::nullopt, noise_words(readout.noise)});
   return section;
 }
 

@@ -1,13 +1,14 @@
 #pragma once
 
 #include "gainsay/cli/markup.h"
+#include "gainsay/cli/reaction_equation.h"
 #include "gainsay/cli/study.h"
 #include "gainsay/core/expression.h"
 #include "gainsay/estimation/problem.h"
 
 #include <cstddef>
-#include <functional>
 #include <map>
+#include <optional>
 #include <string>
 #include <string_view>
 #include <vector>
@@ -25,8 +26,8 @@ struct Equation {
   };
   Left left = Left::Name;
   std::string name;
-  core::Expression right;  ///< as written by the author; names stay names
-  std::string turnover;    ///< of a reaction: "nitrile -> amide"; else empty
+  core::Expression right;                    ///< as written by the author; names stay names
+  std::optional<ReactionEquation> turnover;  ///< of a reaction
   std::string words;
 };
 

@@ -11,7 +11,7 @@ std::string element(std::string_view tag, const std::string& content) {
 }
 
 /// The d of a derivative, upright as ISO 80000-2 sets it.
-const std::string kDifferential = "<mi mathvariant=\"normal\">d</mi>";
+const std::string kDifferential = "<mi mathvariant=\"normal\">d</mi><mspace width=\"0.12em\"/>";
 
 std::string argument(const std::string& inside) {
   return "<mo>&#x2061;</mo>" + element("mrow", "<mo stretchy=\"false\">(</mo>" + inside +
@@ -19,15 +19,7 @@ std::string argument(const std::string& inside) {
 }
 
 Markup math(const std::string& content) {
-  return Markup::raw("<math>" + element("mrow", content) + "</math>");
-}
-
-/// A reaction's equation with arrows as signs.
-std::string with_arrows(std::string turnover) {
-  const auto sign = turnover.find("->");
-  const bool reversible = sign > 0 && turnover[sign - 1] == '<';
-  const std::size_t begin = reversible ? sign - 1 : sign;
-  return turnover.replace(begin, sign + 2 - begin, reversible ? "⇌" : "→");
+  return Markup::raw("<math displaystyle=\"true\">" + element("mrow", content) + "</math>");
 }
 
 class Setter {
@@ -45,9 +37,7 @@ class Setter {
     Markup line = tag("span", {{"class", "left"}}, math(left(equation)));
     line += tag("span", {{"class", "right"}},
                 math("<mo>=</mo>" + core::print_mathml(equation.right, shown)));
-    std::string words = equation.turnover.empty() ? "" : with_arrows(equation.turnover);
-    if (!words.empty() && !equation.words.empty()) words += "; ";
-    words += equation.words;
+    const std::string words = words_beside(equation);
     if (!words.empty()) line += tag("span", {{"class", "words"}}, text(words));
     return tag("div", {{"class", "equation"}}, line);
   }
@@ -59,12 +49,23 @@ class Setter {
   }
 
  private:
+  std::string words_beside(const Equation& equation) const {
+    if (!equation.turnover) return equation.words;
+    const auto as_shown = [this](std::string_view name) {
+      const auto shown = form_.shown_as.find(name);
+      return shown == form_.shown_as.end() ? std::string(name) : shown->second;
+    };
+    const std::string words =
+        equation_text(*equation.turnover, equation.turnover->reversible ? "⇌" : "→", as_shown);
+    return equation.words.empty() ? words : words + "; " + equation.words;
+  }
+
   std::string left(const Equation& equation) const {
     const std::string shown = name(equation.name);
     switch (equation.left) {
       case Equation::Left::Derivative:
         return element("mfrac", element("mrow", kDifferential + shown) +
-                                    element("mrow", kDifferential + "<mi>t</mi>"));
+                                    "<mrow><mi mathvariant=\"normal\">d</mi><mi>t</mi></mrow>");
       case Equation::Left::Name:
         return shown;
       case Equation::Left::AtBeginning:
@@ -105,7 +106,7 @@ std::string_view equations_css() {
   // The left sides share one width so that the signs stand below each other; a table would do the
   // same on fewer engines.
   return ".equations h4{margin:1.2em 0 .3em;font-style:italic}"
-         ".equations .equation{margin:.35em 0;overflow-x:auto;break-inside:avoid}"
+         ".equations .equation{margin:.35em 0;overflow-x:auto;overflow-y:hidden;break-inside:avoid}"
          ".equations .left{display:inline-block;min-width:9.5em;margin-right:.4em}"
          ".equations .words{margin-left:1.6em;opacity:.75;font-size:.9em}";
 }

@@ -42,15 +42,6 @@ std::string words_in_latex(std::string_view words) {
   return text;
 }
 
-std::string turnover_in_latex(std::string turnover) {
-  const auto sign = turnover.find("->");
-  const bool reversible = sign > 0 && turnover[sign - 1] == '<';
-  const std::size_t begin = reversible ? sign - 1 : sign;
-  return words_in_latex(turnover.substr(0, begin)) +
-         (reversible ? "$\\rightleftharpoons$" : "$\\rightarrow$") +
-         words_in_latex(turnover.substr(sign + 2));
-}
-
 class Setter {
  public:
   explicit Setter(const StateSpace& form) : form_(form) {}
@@ -80,16 +71,19 @@ class Setter {
   std::string line(const Equation& equation) const {
     const auto shown = [this](std::string_view each) { return name(each); };
     std::string text = left(equation) + " &= " + core::print_latex(equation.right, shown);
-    std::string words = turnover_words(equation);
-    if (!words.empty()) text += " && \\text{" + words + "}";
+    if (equation.turnover)
+      text += " && " +
+              equation_text(*equation.turnover,
+                            equation.turnover->reversible ? "\\rightleftharpoons" : "\\rightarrow",
+                            shown);
+    if (!equation.words.empty())
+      text += (equation.turnover ? "\\quad " : " && ") + in_text(equation.words);
     return text;
   }
 
  private:
-  static std::string turnover_words(const Equation& equation) {
-    std::string words = equation.turnover.empty() ? "" : turnover_in_latex(equation.turnover);
-    if (!words.empty() && !equation.words.empty()) words += "; ";
-    return words + words_in_latex(equation.words);
+  static std::string in_text(const std::string& words) {
+    return "\\text{" + words_in_latex(words) + "}";
   }
 
   const StateSpace& form_;
@@ -107,7 +101,7 @@ std::string equations_latex(const StateSpace& form) {
       text += "\\begin{align*}\n";
       for (std::size_t i = 0; i < section.equations.size(); ++i)
         text += "  " + setter.line(section.equations[i]) +
-                (i + 1 < section.equations.size() ? " \\\\\n" : "\n");
+                (i + 1 < section.equations.size() ? " \\\\[2pt]\n" : "\n");
       text += "\\end{align*}\n";
     }
     if (!section.quantities.empty()) {
@@ -124,9 +118,10 @@ std::string equations_latex(const StateSpace& form) {
 std::string equations_latex_document(const std::vector<StateSpace>& forms,
                                      std::string_view study_title) {
   std::string text =
-      "\\documentclass{article}\n"
+      "\\documentclass[fleqn]{article}\n"
       "\\usepackage[utf8]{inputenc}\n"
       "\\usepackage[T1]{fontenc}\n"
+      "\\usepackage[margin=25mm]{geometry}\n"
       "\\usepackage{amsmath}\n"
       "\\allowdisplaybreaks\n"
       "\\title{" +

@@ -34,9 +34,11 @@ std::string left_of(const Equation& equation, bool begins_at_zero) {
 }
 
 std::string words_beside(const Equation& equation) {
-  if (equation.turnover.empty() || equation.words.empty())
-    return equation.turnover + equation.words;
-  return equation.turnover + "; " + equation.words;
+  if (!equation.turnover) return equation.words;
+  const auto as_written = [](std::string_view name) { return std::string(name); };
+  const std::string turnover =
+      equation_text(*equation.turnover, equation.turnover->reversible ? "<->" : "->", as_written);
+  return equation.words.empty() ? turnover : turnover + "; " + equation.words;
 }
 
 std::vector<Line> lines_of(const EquationSection& section, bool begins_at_zero) {

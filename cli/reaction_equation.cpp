@@ -158,12 +158,21 @@ core::Failure without_arrow(std::string_view text) {
   return failure;
 }
 
-std::string side_text(const std::vector<core::Term>& terms, const core::Hypothesis& hypothesis) {
+std::vector<EquationPart> parts_of(const std::vector<core::Term>& terms,
+                                   const core::Hypothesis& hypothesis) {
+  std::vector<EquationPart> parts;
+  for (const core::Term& term : terms)
+    parts.push_back({term.coefficient, hypothesis.species[term.species].name, {}});
+  return parts;
+}
+
+std::string side_text(const std::vector<EquationPart>& side,
+                      const std::function<std::string(std::string_view)>& shown) {
   std::string text;
-  for (const core::Term& term : terms) {
+  for (const EquationPart& part : side) {
     if (!text.empty()) text += " + ";
-    if (term.coefficient != 1.0) text += core::print_number(term.coefficient) + " ";
-    text += hypothesis.species[term.species].name;
+    if (part.coefficient != 1.0) text += core::print_number(part.coefficient) + " ";
+    text += shown(part.species);
   }
   return text;
 }
@@ -200,11 +209,21 @@ core::Expression mass_action_side(const std::vector<EquationPart>& side) {
   return product;
 }
 
+ReactionEquation equation_of(const core::Reaction& reaction, const core::Hypothesis& hypothesis) {
+  return {parts_of(reaction.reactants, hypothesis), parts_of(reaction.products, hypothesis),
+          reaction.reversible};
+}
+
+std::string equation_text(const ReactionEquation& equation, std::string_view arrow,
+                          const std::function<std::string(std::string_view)>& shown) {
+  const std::string from = side_text(equation.left, shown);
+  const std::string to = side_text(equation.right, shown);
+  return from + (from.empty() ? "" : " ") + std::string(arrow) + (to.empty() ? "" : " ") + to;
+}
+
 std::string equation_text(const core::Reaction& reaction, const core::Hypothesis& hypothesis) {
-  const std::string from = side_text(reaction.reactants, hypothesis);
-  const std::string to = side_text(reaction.products, hypothesis);
-  return from + (from.empty() ? "" : " ") + (reaction.reversible ? "<->" : "->") +
-         (to.empty() ? "" : " ") + to;
+  return equation_text(equation_of(reaction, hypothesis), reaction.reversible ? "<->" : "->",
+                       [](std::string_view name) { return std::string(name); });
 }
 
 }  // namespace gainsay::cli

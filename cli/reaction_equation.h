@@ -5,6 +5,7 @@
 #include "gainsay/core/place.h"
 #include "gainsay/core/result.h"
 
+#include <functional>
 #include <string>
 #include <string_view>
 #include <vector>
@@ -33,6 +34,13 @@ core::Result<ReactionEquation> read_equation(std::string_view text);
 
 /// The product of a side's species with coefficients as powers; 1 for an empty side.
 core::Expression mass_action_side(const std::vector<EquationPart>& side);
+
+/// What a reaction of a mechanism turns into what; places are empty.
+ReactionEquation equation_of(const core::Reaction& reaction, const core::Hypothesis& hypothesis);
+
+/// "2 A + B -> C" with an arrow of one's own; `shown` says how a species is printed.
+std::string equation_text(const ReactionEquation& equation, std::string_view arrow,
+                          const std::function<std::string(std::string_view)>& shown);
 
 /// A reaction's equation as its author would write it: "2 A + B -> C", "A <-> B", "-> A".
 std::string equation_text(const core::Reaction& reaction, const core::Hypothesis& hypothesis);

@@ -10,12 +10,13 @@ namespace {
 using Sum = std::optional<Expression>;  // none: an empty sum
 
 void add(Sum& sum, double coefficient, const Expression& what) {
-  const double size = std::abs(coefficient);
-  const Expression term = size == 1.0 ? what : Expression(size) * what;
+  const auto times = [&](double factor) {
+    return factor == 1.0 ? what : Expression(factor) * what;
+  };
   if (!sum)
-    sum = coefficient < 0.0 ? -term : term;
+    sum = coefficient == -1.0 ? -what : times(coefficient);
   else
-    sum = coefficient < 0.0 ? *sum - term : *sum + term;
+    sum = coefficient < 0.0 ? *sum - times(-coefficient) : *sum + times(coefficient);
 }
 
 /// `volume` by its compartment's name, or none where it is the number 1.
@@ -30,9 +31,10 @@ Expression rate_of_change(const Hypothesis& hypothesis, std::size_t number) {
   if (species.held) return 0.0;
   Sum rates;
   Sum flows;
-  for (const auto& reaction : hypothesis.reactions)
-    if (const double nu = stoichiometric_coefficient(reaction, number); nu != 0.0)
-      add(reaction.flow ? flows : rates, nu, Expression::symbol(reaction.name));
+  for (const double sign : {1.0, -1.0})  // what makes it first, so that few sums begin with a minus
+    for (const auto& reaction : hypothesis.reactions)
+      if (const double nu = stoichiometric_coefficient(reaction, number); sign * nu > 0.0)
+        add(reaction.flow ? flows : rates, nu, Expression::symbol(reaction.name));
 
   if (const auto volume = volume_of(hypothesis, species)) {
     if (species.amount && rates) rates = *volume * *rates;

@@ -13,8 +13,8 @@ namespace gainsay::core {
 double stoichiometric_coefficient(const Reaction& reaction, std::size_t species);
 
 /// dy/dt of every species with reactions and compartments by name, as an author would write it:
-/// `feeding / tank - hydration`. Methods (1)-(3), with F_j the flow of reaction j [amount/time],
-/// v_j its rate [concentration/time], V the volume of the species' compartment:
+/// `hydration - hydrolysis`, what makes it first. Methods (1)-(3), with F_j the flow of reaction j
+/// [amount/time], v_j its rate [concentration/time], V the volume of the species' compartment:
 ///   concentration: sum nu_ij v_j + (1/V) sum nu_ij F_j,
 ///   amount:        V sum nu_ij v_j + sum nu_ij F_j,
 ///   held:          0.

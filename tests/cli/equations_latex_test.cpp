@@ -29,8 +29,8 @@ int depth_at_end(const std::string& text) {
 TEST(EquationsLatex, SetsDerivativesReactionsAndStarts) {
   const std::string text = equations_latex(fed_batch_form());
   EXPECT_THAT(text, HasSubstr("\\frac{\\mathrm{d}\\,S}{\\mathrm{d}\\,t} &= "));
-  EXPECT_THAT(text, HasSubstr("\\text{2 S $\\rightarrow$ R}"));
-  EXPECT_THAT(text, HasSubstr("\\text{R $\\rightleftharpoons$ 2 S}"));
+  EXPECT_THAT(text, HasSubstr("&& 2 S \\rightarrow \\mathrm{R*}"));
+  EXPECT_THAT(text, HasSubstr("&& \\mathrm{R*} \\rightleftharpoons 2 S"));
   EXPECT_THAT(text, HasSubstr("S(0) &= 4"));
   EXPECT_THAT(text, HasSubstr("\\Delta\\,S &= \\frac{10}{\\mathrm{tank}}"));
   EXPECT_THAT(text, HasSubstr("\\mathrm{glow}(t) &= "));

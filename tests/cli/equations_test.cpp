@@ -14,13 +14,19 @@ using testing::fed_batch;
 using testing::fed_batch_form;
 using ::testing::IsEmpty;
 
+std::string turnover(const Equation& equation) {
+  if (!equation.turnover) return "";
+  return equation_text(*equation.turnover, equation.turnover->reversible ? "<->" : "->",
+                       [](std::string_view name) { return std::string(name); });
+}
+
 std::vector<std::string> lines(const StateSpace& form, const std::string& title) {
   std::vector<std::string> all;
   for (const auto& section : form.sections) {
     if (section.title != title) continue;
     for (const auto& equation : section.equations)
       all.push_back(equation.name + " = " + core::print_text(equation.right) + " | " +
-                    equation.turnover + " | " + equation.words);
+                    turnover(equation) + " | " + equation.words);
     for (const auto& quantity : section.quantities)
       all.push_back(quantity.name + ": " + quantity.words);
   }
@@ -30,7 +36,7 @@ std::vector<std::string> lines(const StateSpace& form, const std::string& title)
 TEST(StateSpace, DerivativesNameReactions) {
   const StateSpace form = fed_batch_form();
   EXPECT_THAT(lines(form, "Derivatives"),
-              ElementsAre("S = -(2 * turnover) + 2 * relaxing + feeding / tank |  | ",
+              ElementsAre("S = 2 * relaxing - 2 * turnover + feeding / tank |  | ",
                           "R = turnover - relaxing |  | ", "H = 0 |  | held by the experimenter"));
   EXPECT_THAT(lines(form, "Reactions"),
               ElementsAre("turnover = kcat * S / brake | 2 S -> R | ",

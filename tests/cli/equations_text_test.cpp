@@ -13,12 +13,14 @@ StateSpace decay() {
   const Expression A = Expression::symbol("A");
   const Expression loss = Expression::symbol("loss");
   StateSpace form{"B", "Decay", {}, true, {{"A", "A*"}}};
-  form.sections.push_back({"Derivatives", {{Left::Derivative, "A", -loss, "", ""}}, {}});
-  form.sections.push_back(
-      {"Reactions", {{Left::Name, "loss", Expression::symbol("k") * A, "A ->", "a flow"}}, {}});
-  form.sections.push_back({"Start values", {{Left::AtBeginning, "A", 2.0, "", "in low"}}, {}});
-  form.sections.push_back({"Measurement equations", {{Left::OverTime, "glow", A, "", ""}}, {}});
-  form.sections.push_back({"Additions", {{Left::Rise, "A", 1.0, "", "at t = 3"}}, {}});
+  form.sections.push_back({"Derivatives", {{Left::Derivative, "A", -loss, {}, ""}}, {}});
+  form.sections.push_back({"Reactions",
+                           {{Left::Name, "loss", Expression::symbol("k") * A,
+                             ReactionEquation{{{1.0, "A", {}}}, {}, false}, "a flow"}},
+                           {}});
+  form.sections.push_back({"Start values", {{Left::AtBeginning, "A", 2.0, {}, "in low"}}, {}});
+  form.sections.push_back({"Measurement equations", {{Left::OverTime, "glow", A, {}, ""}}, {}});
+  form.sections.push_back({"Additions", {{Left::Rise, "A", 1.0, {}, "at t = 3"}}, {}});
   form.sections.push_back({"Kinetic unknowns", {}, {{"k", "0.1 to 10"}, {"kd[run-03]", "1 to 2"}}});
   return form;
 }

@@ -24,9 +24,9 @@ TEST(Balance, CoefficientsMultiplyTheRateOfTheReaction) {
                                     .rate("pairing", {{"M", 2}}, {{"D", 1}}, "k * M^2")
                                     .rate("half", {{"D", 0.5}}, {}, "q * D");
   EXPECT_THAT(printed(balance_by_name(hypothesis)),
-              ElementsAre("-(2 * pairing)", "pairing - 0.5 * half"));
+              ElementsAre("-2 * pairing", "pairing - 0.5 * half"));
   EXPECT_THAT(printed(balance(hypothesis)),
-              ElementsAre("-(2 * (k * M^2))", "k * M^2 - 0.5 * (q * D)"));
+              ElementsAre("-2 * (k * M^2)", "k * M^2 - 0.5 * (q * D)"));
 }
 
 // Mass balances of two compartments joined by flow, as in any text on compartmental analysis
