@@ -21,7 +21,7 @@ enum class Stages {
   LastOnly  ///< all data with their true sd and nothing else, for starts that are near already
 };
 
-/// The first part of a descent: gets into the basin. Methods (38). Nothing where the start cannot
+/// The first part of a descent: gets into the basin. Methods (19). Nothing where the start cannot
 /// be evaluated.
 std::optional<Eigen::VectorXd> approach(Allowance& allowance, const Eigen::VectorXd& start,
                                         Stages stages);

@@ -53,7 +53,7 @@ class Block : public ceres::CostFunction {
   Rows rows_;
 };
 
-/// N_g ln(1 + s / (N_g f^2)) of a block's sum of squares s. Methods (34).
+/// N_g ln(1 + s / (N_g f^2)) of a block's sum of squares s. Methods (14).
 class UnknownNoise : public ceres::LossFunction {
  public:
   explicit UnknownNoise(const NoiseGroup& group) : group_(group) {}
@@ -85,7 +85,15 @@ std::vector<Rows> blocks_of(const Problem& problem) {
   return blocks;
 }
 
+/// True where nothing is integrated: a plain regression, exact but for rounding.
+bool is_algebraic(const Problem& problem) {
+  return std::all_of(problem.experiments.begin(), problem.experiments.end(),
+                     [](const FittedExperiment& fitted) { return fitted.program->states() == 0; });
+}
+
 ceres::Solver::Options options_for(const Problem& problem) {
+  // What the integration cannot tell apart is one; below that only rejected steps would follow.
+  const double accuracy = is_algebraic(problem) ? 1e-14 : problem.relative_accuracy;
   ceres::Solver::Options options;
   options.linear_solver_type = ceres::DENSE_QR;
   options.dense_linear_algebra_library_type = ceres::EIGEN;
@@ -93,9 +101,8 @@ ceres::Solver::Options options_for(const Problem& problem) {
   options.logging_type = ceres::SILENT;
   options.max_num_iterations = 100;
   options.max_num_consecutive_invalid_steps = 50;
-  // A change of V below what the integration can tell apart is none.
-  options.function_tolerance = 1e-3 * problem.relative_accuracy;
-  options.parameter_tolerance = 1e-2 * problem.relative_accuracy;
+  options.function_tolerance = 1e-2 * accuracy;
+  options.parameter_tolerance = accuracy;
   options.gradient_tolerance = 1e-10;
   return options;
 }

@@ -47,8 +47,8 @@ struct CeresEnd {
 
 /// Moves the bench to where Ceres' Levenberg-Marquardt descent over the free unknowns ends: one
 /// residual block for data of known noise and priors, one with its loss for each group of unknown
-/// noise. Points outside the box, and those that cannot be integrated, are refused. Methods (34),
-/// (39). Requires a free unknown, and noise that does not depend on the model.
+/// noise. Points outside the box, and those that cannot be integrated, are refused. Methods (14),
+/// (20). Requires a free unknown, and noise that does not depend on the model.
 CeresEnd solve_with_ceres(Workbench& bench);
 
 }  // namespace gainsay::estimation

@@ -13,6 +13,9 @@ namespace {
 constexpr double kOnBound = 1e-6;
 /// A held unknown is released where the quadratic model promises more than this, in units of V.
 constexpr double kWorthReleasing = 1e-4;
+/// Who converged must not leave more than this to the quadratic model, in units of V. Refused
+/// points shrink Ceres' steps until it takes them for converged.
+constexpr double kPromiseLeft = 0.01;
 /// Rounds of holding and releasing.
 constexpr int kRounds = 10;
 
@@ -30,7 +33,7 @@ bool wants_back(Side side, double gradient) {
 }
 
 /// The unknowns held on bounds while the others move, and how that changes from round to round.
-/// Methods (40).
+/// Methods (21).
 class Holding {
  public:
   Holding(const Box& box, Eigen::Index unknowns)
@@ -87,10 +90,15 @@ FinishEnd ended(Workbench& bench, const Box& box, bool converged, std::string wh
   FinishEnd end;
   end.x = bench.x();
   end.why = std::move(why);
-  if (const Evaluation* here = bench.evaluate()) {
-    end.evaluation = *here;
-    end.on_bound = on_bound(box, end.x, local_model(*here).gradient);
-    end.converged = converged;
+  const Evaluation* here = bench.evaluate();
+  if (here == nullptr) return end;
+  end.evaluation = *here;
+  const LocalModel model = local_model(*here);
+  end.on_bound = on_bound(box, end.x, model.gradient);
+  end.converged = converged;
+  if (converged && promise(model, end.x, box) > kPromiseLeft) {
+    end.converged = false;
+    end.why = "points beyond its end cannot be evaluated";
   }
   return end;
 }
@@ -140,6 +148,7 @@ FinishEnd finish(Allowance& allowance, const Box& box, const Eigen::VectorXd& fr
   settle();
   for (int round = 0; round < kRounds; ++round) {
     const CeresEnd solved = solve_free(bench, holding);
+    if (allowance.closed()) return ended(bench, box, false, "nothing more was to be evaluated");
     if (!settle()) return ended(bench, box, solved.converged, solved.why);
   }
   return ended(bench, box, false, "unknowns kept going to bounds and back");
@@ -155,7 +164,7 @@ FinishEnd finish_in_region(Allowance& allowance, const Box& box, const Eigen::Ve
   bool converged = false;
   double before = std::numeric_limits<double>::infinity();
   // A region that rejections have made small settles too early: only one that was opened anew and
-  // found nothing counts. Methods (41).
+  // found nothing counts. Methods (22).
   for (int round = 0; round < kRounds && !converged; ++round) {
     descended = descend_in_region(objective, box, descended.x, plan);
     if (descended.why != RegionEnd::Why::Settled) break;

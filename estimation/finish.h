@@ -20,7 +20,7 @@ struct FinishEnd {
 };
 
 /// The second part of a descent, by Ceres' trust region (Levenberg-Marquardt), on the unknowns that
-/// are not on a bound: Methods (39)-(41). An unknown that ends within 1e-6 of its range from a
+/// are not on a bound: Methods (20)-(22). An unknown that ends within 1e-6 of its range from a
 /// bound is put on it and held, one whose gradient wants back is released, and the finish is
 /// repeated until neither happens. Requires noise that does not depend on the model.
 FinishEnd finish(Allowance& allowance, const Box& box, const Eigen::VectorXd& from);

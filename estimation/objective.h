@@ -11,7 +11,7 @@
 
 namespace gainsay::estimation {
 
-/// The quadratic model of half the objective at an evaluation with Jacobian. Methods (32).
+/// The quadratic model of half the objective at an evaluation with Jacobian. Methods (13).
 LocalModel local_model(const Evaluation& evaluation);
 
 /// What one descent may use of an evaluator, and what it has used.

@@ -17,7 +17,7 @@ struct Optimum {
 
 /// True where two ends are one optimum; never by their unknowns, which a flat valley leaves free.
 /// Where V says nothing (noise unknown) or is not what was lowered (sd by the model), the objective
-/// stands for it. Methods (48).
+/// stands for it. Methods (25).
 bool are_one_optimum(const Fit& a, const Fit& b);
 
 /// True where `a` is to be preferred: converged before not, then the lower objective.

@@ -24,7 +24,7 @@ struct Step {
   double predicted = 0.0;  // gain
 };
 
-/// The best step of the local model in box and region. Methods (33).
+/// The best step of the local model in box and region. Methods (16).
 Step best_step(const LocalModel& here, const Eigen::VectorXd& x, const Box& box, double radius,
                const Eigen::VectorXd& unit) {
   const Eigen::Index n = x.size();
@@ -45,7 +45,7 @@ Step best_step(const LocalModel& here, const Eigen::VectorXd& x, const Box& box,
   return step;
 }
 
-/// How the region grows and shrinks. Methods (37).
+/// How the region grows and shrinks. Methods (18).
 class Radius {
  public:
   double value() const { return value_; }
@@ -147,6 +147,12 @@ class RegionDescent {
 };
 
 }  // namespace
+
+double promise(const LocalModel& here, const Eigen::VectorXd& x, const Box& box) {
+  if (x.size() == 0) return 0.0;
+  const double all = (box.high - box.low).maxCoeff();
+  return best_step(here, x, box, all, Eigen::VectorXd::Ones(x.size())).predicted;
+}
 
 RegionEnd descend_in_region(Landscape& landscape, const Box& box, const Eigen::VectorXd& from,
                             const RegionPlan& plan) {

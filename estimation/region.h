@@ -35,7 +35,10 @@ struct RegionEnd {
   int models = 0;                  ///< used
 };
 
-/// A descent in a region of trust whose steps are solved inside the box: Methods (33), (36), (37).
+/// What the local model at x promises of the best step inside the box, without a region.
+double promise(const LocalModel& here, const Eigen::VectorXd& x, const Box& box);
+
+/// A descent in a region of trust whose steps are solved inside the box: Methods (16), (17), (18).
 /// `from` lies in the box.
 RegionEnd descend_in_region(Landscape& landscape, const Box& box, const Eigen::VectorXd& from,
                             const RegionPlan& plan);

@@ -14,7 +14,7 @@ namespace gainsay::estimation {
 std::vector<std::size_t> linear_unknowns(const Problem& problem);
 
 /// `x` with the unknowns `which` (of linear_unknowns) where weighted linear regression of the data
-/// on the trajectory of x puts them, within their ranges. Methods (42). Sds that depend on the
+/// on the trajectory of x puts them, within their ranges. Methods (23). Sds that depend on the
 /// modelled value are taken at the observed one, unknown ones as equal within a readout. Nothing
 /// where x cannot be integrated to the end.
 std::optional<Eigen::VectorXd> regressed(Allowance& allowance, const Eigen::VectorXd& x,

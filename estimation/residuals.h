@@ -32,7 +32,7 @@ struct Evaluation {
   double objective =
       std::numeric_limits<double>::quiet_NaN();  ///< -2 ln L up to a constant: what a fit lowers
   /// Half the gradient of the objective is J' slope, half its curvature (Gauss-Newton; Fisher's
-  /// information) J' diag(curvature) J. Methods (31)-(34).
+  /// information) J' diag(curvature) J. Methods (12)-(14).
   Eigen::VectorXd slope;
   Eigen::VectorXd curvature;
   std::vector<double> group_sds;  ///< estimated, of Problem::noise_groups
@@ -44,7 +44,7 @@ struct EvaluationFailure {
   core::IntegrationFailure integration;
 };
 
-/// What counts in a stage of a descent. Methods (38).
+/// What counts in a stage of a descent. Methods (19).
 struct Stage {
   double horizon = 1.0;   ///< share of each experiment's own last time up to which data count
   bool tempered = false;  ///< sd^2 + (0.1 max|z|)^2, z the values of one readout in one experiment;

@@ -49,7 +49,7 @@ struct SearchResult {
 using SearchObserver = std::function<void(std::size_t done, std::size_t expected, double best_V)>;
 
 /// Many descents, on all threads; bit-identical for any number of them: descents are numbered and
-/// settled in order of number, and every rule reads what is settled. Methods (46)-(49). First
+/// settled in order of number, and every rule reads what is settled. Methods (24), (25). First
 /// guesses come first (the middle of the box where there are none and no random start is wanted),
 /// then random starts. The descent with which the budget (times the number of experiments) is used
 /// up is the last one; an interruption keeps what is settled.

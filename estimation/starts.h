@@ -36,7 +36,7 @@ class Draws {
 
 /// Start number n: uniform in the box of search coordinates, keyed by (seed, n); each coordinate
 /// has its own draws, keyed by the unknown's name, so that adding an unknown does not change the
-/// others. Methods (46).
+/// others. Methods (24).
 Eigen::VectorXd nth_start(std::span<const Unknown> unknowns, std::uint64_t seed, std::uint64_t n);
 
 /// First guesses as starts, as many as the longest list of `first` has: guess n of each unknown

@@ -9,7 +9,7 @@ namespace gainsay::estimation {
 enum class Aim { Likelihood, Misfit };
 
 /// How one datum of known noise scatters: variance = constant + relative_squared f^2, but at least
-/// `floor`; f the modelled value, units of the readout squared. Methods (30).
+/// `floor`; f the modelled value, units of the readout squared. Methods (11).
 struct Scatter {
   double constant = 0.0;
   double relative_squared = 0.0;
@@ -18,7 +18,7 @@ struct Scatter {
 
 /// One datum weighed: its share of the objective, and what its row of J = (df/dx) / sd contributes
 /// to the quadratic model of half the objective: J' slope to the gradient, J' J curvature to the
-/// curvature. Methods (31)-(32).
+/// curvature. Methods (12)-(13).
 struct Weighed {
   double r = 0.0;   ///< (shown - observed) / sd
   double sd = 0.0;  ///< at the modelled value
@@ -32,7 +32,7 @@ struct Weighed {
 /// below. With model-dependent sd the curvature is Fisher's information.
 Weighed weigh(const Scatter& scatter, double shown, double observed, Aim aim);
 
-/// Data of one readout that share an unknown constant sd. Methods (34).
+/// Data of one readout that share an unknown constant sd. Methods (14).
 struct NoiseGroup {
   std::size_t count = 0;     ///< N_g
   double floor = 0.0;        ///< f, least sd, in units of the readout

@@ -156,8 +156,8 @@ TEST_F(AssembleTest, ToSimulateEveryExperimentShowsEveryReadout) {
 }
 
 // Starts are expected at the geometric middle of their ranges: sqrt(1 * 4) * 0.5 = 1 in the first
-// experiment, sqrt(1 * 9) = 3 in the second, whose dose is expected at sqrt(1 * 2). No reading shows
-// the species alone.
+// experiment, sqrt(1 * 9) = 3 in the second, whose dose is expected at sqrt(1 * 2). No reading
+// shows the species alone.
 TEST_F(AssembleTest, TolerancesFollowTheSizesOfTheExperiment) {
   const Problem problem = assembled();
   EXPECT_THAT(problem.experiments[0].absolute, ElementsAre(::testing::DoubleEq(1e-8)));

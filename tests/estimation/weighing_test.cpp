@@ -1,7 +1,6 @@
 #include "gainsay/estimation/weighing.h"
 
 #include <boost/math/distributions/normal.hpp>
-
 #include <gtest/gtest.h>
 
 #include <cmath>
