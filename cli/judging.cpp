@@ -43,6 +43,7 @@ std::optional<Outcome> judge_one(const Study& study, std::size_t number,
   Outcome outcome;
   outcome.hypothesis = number;
   outcome.problem = std::make_shared<const estimation::Problem>(std::move(problem).value());
+  outcome.network = core::derive_network(hypothesis.mechanism);
   if (observer.begins) observer.begins(number, hypothesis.mechanism.title);
   outcome.judged = stats::judge(*outcome.problem, judge_options(study, options), observer.goes_on);
   if (options.stop.stop_requested()) return std::nullopt;
