@@ -13,7 +13,7 @@ namespace {
 constexpr double kLeastScale = 3.5;  // sd
 constexpr double kMostScale = 8.0;
 constexpr double kCrowdedFrom = 5.5;
-constexpr double kInset = 0.1;  // of an experiment's stretch that stays free at each end
+constexpr double kInset = 0.05;  // of an experiment's stretch that stays free at each end
 
 /// The same scale for all hypotheses: what those shown at first need, within bounds.
 Scale residual_scale(const std::vector<SeriesPicture>& pictures) {
@@ -43,22 +43,17 @@ Markup mark_of(double x, double r, const Scale& scale) {
       tag("path", {{"class", "beyond"}, {"d", above ? "M-3 6H3L0 0Z" : "M-3-6H3L0 0Z"}}, {}));
 }
 
-/// Residuals of one series in the stretch from `left` to `right` of the cell.
-void draw_series(const SeriesPicture& picture, const FitOfSeries& fit, double left, double right,
-                 const Scale& scale, Panel& panel) {
-  if (fit.residuals.empty()) return;
-  double first = picture.readings.front().time;
-  double last = first;
-  for (const Reading& reading : picture.readings) {
-    first = std::min(first, reading.time);
-    last = std::max(last, reading.time);
-  }
-  const double span = last > first ? last - first : 1.0;
+/// Residuals of one series in the stretch from `left` to `right` of the cell, evenly spaced in
+/// order of time.
+void draw_series(const FitOfSeries& fit, double left, double right, const Scale& scale,
+                 Panel& panel) {
+  const double count = static_cast<double>(fit.residuals.size());
   std::vector<Corner> line;
+  double place = 0.5;
   for (const auto& [number, residual] : fit.residuals) {
+    const double inside = kInset + (1.0 - 2.0 * kInset) * place / count;
+    place += 1.0;
     if (!std::isfinite(residual.r)) continue;
-    const double inside =
-        kInset + (1.0 - 2.0 * kInset) * (picture.readings[number].time - first) / span;
     const double x = left + (right - left) * inside;
     line.push_back({x, scale.place(residual.r)});
     panel.marks += mark_of(x, residual.r, scale);
@@ -131,7 +126,7 @@ Markup cell_of(const Page& page, const Contender& contender, std::size_t readout
     const double left = static_cast<double>(i) / static_cast<double>(count);
     const double right = static_cast<double>(i + 1) / static_cast<double>(count);
     for (const FitOfSeries& fit : pictures[i]->fits) {
-      if (fit.contender == &contender) draw_series(*pictures[i], fit, left, right, scale, panel);
+      if (fit.contender == &contender) draw_series(fit, left, right, scale, panel);
     }
   }
   const std::string name = title_of(page.study().readouts[readout]);

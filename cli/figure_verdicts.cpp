@@ -13,7 +13,7 @@ namespace {
 
 constexpr double kLeft = 0.03;  // shares of the column that stay free, for shapes at the ends
 constexpr double kRight = 0.96;
-constexpr double kLogarithmicFrom = 3.0;  // a farthest rival beyond this many limits
+constexpr double kLogarithmicFrom = 4.0;  // a farthest rival beyond this many limits
 
 /// Takes distances (1 is the limit) to shares of the column.
 struct BarAxis {
@@ -114,7 +114,7 @@ Markup row(const Contender& contender, const BarAxis& axis) {
   if (contender.outcome != nullptr) {
     const stats::Verdict& verdict = contender.outcome->judged.verdict;
     if (!verdict.reason.empty()) {
-      heading += tag("span", {{"class", "reason"}}, text(verdict.reason));
+      heading += tag("span", {{"class", "reason"}}, text(with_raised_powers(verdict.reason)));
     }
     if (!verdict.noise_unknown) {
       misfit = significant(verdict.V, 4);

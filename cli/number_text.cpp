@@ -3,6 +3,7 @@
 #include <array>
 #include <charconv>
 #include <cmath>
+#include <regex>
 #include <string_view>
 
 namespace gainsay::cli {
@@ -76,6 +77,18 @@ std::string fixed(double value, int decimals) {
 std::string p_text(double p_value) {
   if (p_value == 0.0) return "below 10⁻³⁰⁰";
   return significant(p_value, 2);
+}
+
+std::string with_raised_powers(const std::string& words) {
+  static const std::regex kPower("([0-9])e([+-]?[0-9]{1,3})(?![0-9A-Za-z_])");
+  std::string out;
+  auto rest = words.cbegin();
+  for (std::sregex_iterator it(words.begin(), words.end(), kPower), end; it != end; ++it) {
+    out.append(rest, (*it)[1].second);
+    out += "\u202f·\u202f10" + raised(std::stoi((*it)[2].str()));
+    rest = (*it)[0].second;
+  }
+  return out.append(rest, words.cend());
 }
 
 std::string percent_text(double share) {

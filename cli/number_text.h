@@ -18,6 +18,9 @@ std::string fixed(double value, int decimals);
 /// A P value: two significant digits; "below 10^-300" (raised) where it is 0 in double precision.
 std::string p_text(double p_value);
 
+/// Words with their powers of ten set as on pages: "P = 2.7e-12" has a raised -12.
+std::string with_raised_powers(const std::string& words);
+
 /// "12 %" with a thin space; one decimal below 10 %.
 std::string percent_text(double share);
 

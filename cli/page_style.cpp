@@ -1,7 +1,9 @@
 #include "gainsay/cli/page_style.h"
 
+#include "gainsay/cli/equations.h"
 #include "gainsay/cli/hues.h"
 #include "gainsay/cli/markup.h"
+#include "gainsay/cli/math_font.h"
 
 namespace gainsay::cli {
 namespace {
@@ -15,7 +17,7 @@ font-variant-numeric:lining-nums;overflow-wrap:break-word}
 h1{font-weight:400;font-size:1.9rem;line-height:1.2;letter-spacing:-.006em;margin:.15rem 0 .7rem;
 max-width:36em;text-wrap:balance}
 header .study{font-style:italic;color:var(--grey);margin:0}
-header .fact{margin:0 0 .15rem;max-width:52rem;font-size:1.06rem}
+header .fact{margin:0 0 .15rem;max-width:60rem;font-size:1.06rem;text-wrap:pretty}
 header{padding-bottom:1.5rem}
 h2{font:italic 400 1.18rem/1.3 inherit;font-family:inherit;font-style:italic;font-weight:400;
 font-size:1.18rem;line-height:1.3;margin:0 0 .35rem}
@@ -23,7 +25,7 @@ h3{font-weight:400;font-size:.84rem;line-height:1.4;margin:0 0 .5rem}
 h3 b,b.letter{font-weight:600}
 p{margin:0 0 .6rem;max-width:42rem}
 a{color:inherit}
-section{display:grid;grid-template-columns:10.6rem minmax(0,1fr);column-gap:2.4rem;
+main>section{display:grid;grid-template-columns:10.6rem minmax(0,1fr);column-gap:2.4rem;
 border-top:1px solid var(--hair);padding:1.4rem 0 2.3rem}
 .margin{color:var(--grey);font-size:.86rem;line-height:1.45}
 .margin h2{color:var(--ink)}
@@ -72,7 +74,8 @@ vertical-align:-.04em;overflow:visible}
 .ring{fill:var(--paper);stroke:var(--hue);stroke-width:1.7}
 .shape .full{fill:var(--hue)}
 dl.reasons{margin:0;display:grid;grid-template-columns:minmax(0,14rem) minmax(0,1fr);gap:.7rem 2rem}
-dl.reasons dt{font-family:inherit}
+dl.reasons dt{padding-left:3.1em;text-indent:-3.1em}
+dl.reasons dt *{text-indent:0}
 dl.reasons dd{margin:0}
 dl.reasons p{margin:0 0 .25rem}
 )css";
@@ -152,8 +155,9 @@ vector-effect:non-scaling-stroke}
 .mechanism .own text{fill:var(--hue)}
 .systems{display:grid;gap:1.4rem 2.4rem}
 .side-by-side.systems{grid-template-columns:repeat(2,minmax(0,1fr))}
-.equation{margin:0 0 .55rem;overflow-x:auto;overflow-y:hidden}
-.equations math{font:1.06rem/1.2 "STIX Two Math","STIX Math","Cambria Math","Latin Modern Math",math}
+.equations{font-size:.92rem}
+.equations h4{font-weight:400;color:var(--grey);font-size:.84rem}
+.equations math{font:1.06rem/1.2 "Gainsay Math","STIX Two Math","Cambria Math",math}
 )css";
 
 constexpr const char* kScripted = R"css(
@@ -175,7 +179,7 @@ border:1px solid var(--hair);padding:.3rem .55rem;font-size:.74rem;line-height:1
 constexpr const char* kPhone = R"css(
 @media screen and (max-width:960px){
 body{padding:1.6rem 1.6rem 3rem}
-section{grid-template-columns:minmax(0,1fr)}
+main>section{grid-template-columns:minmax(0,1fr)}
 .margin{margin-bottom:1rem}
 .columns-3,.columns-4{grid-template-columns:repeat(2,minmax(0,1fr))}
 .panels figcaption,.panels:not(.headed) figcaption{position:static;width:auto;height:auto;
@@ -220,9 +224,10 @@ padding:.45rem 0;border-bottom:1px solid var(--faint)}
 
 constexpr const char* kPrint = R"css(
 @media print{
-html{font-size:9.5pt}
+html{font-size:9.5pt;background:none}
+:root{--paper:#fff}
 body{max-width:none;padding:0}
-section{grid-template-columns:8.2rem minmax(0,1fr);column-gap:1.4rem;padding:.9rem 0 1.1rem}
+main>section{grid-template-columns:8.2rem minmax(0,1fr);column-gap:1.4rem;padding:.9rem 0 1.1rem}
 h1{font-size:1.6rem}
 .print-only{display:block}
 .screen-only,.ticks,details,dialog,.reading-of{display:none}
@@ -231,8 +236,18 @@ h1{font-size:1.6rem}
 h2,h3{break-after:avoid}
 .panel>svg{height:6.2rem}
 .residuals>svg{height:4.2rem}
-.equation{break-inside:avoid;overflow:visible}
-.verdicts .drawn{width:25%}
+.equations .equation{overflow:visible}
+.verdicts th:first-child{width:31%}
+.verdicts .drawn{width:20%}
+.verdicts th.n{width:3.1rem}
+.verdicts th.n:nth-child(5){width:4.9rem}
+.verdicts tbody td.drawn,.verdicts svg{height:2.1rem}
+.verdicts tbody th,.verdicts tbody td{padding-top:.22rem;padding-bottom:.22rem}
+.axis svg{height:1.1rem}
+dl.reasons{font-size:.9rem;gap:.45rem 1.2rem;grid-template-columns:minmax(0,9.5rem) minmax(0,1fr)}
+dl.reasons p{display:inline}
+dl.reasons p::after{content:" "}
+.statistics{margin-top:.5rem}
 }
 )css";
 
@@ -247,6 +262,13 @@ std::string colours(const Palette& palette) {
     out += name(("h" + std::to_string(i + 1)).c_str(), palette.hues[i]);
   }
   return out + "}\n";
+}
+
+/// A part of STIX Math under the SIL Open Font License.
+std::string mathematics() {
+  return "@font-face{font-family:\"" + std::string(kMathFamily) +
+         "\";src:url(\"data:font/woff2;base64," + std::string(math_font()) +
+         "\") format(\"woff2\")}\n" + std::string(equations_css()) + "\n";
 }
 
 std::string hue_classes() {
@@ -287,7 +309,7 @@ std::string paper_footer(const Page& page) {
 std::string page_style(const Page& page) {
   return "\n:root{color-scheme:light dark}\n" + colours(kLight) +
          "@media screen and (prefers-color-scheme:dark){" + colours(kDark) + "}\n" + hue_classes() +
-         kType + kTables + kPictures + kScripted + kPhone + kPrint + ticking(page) +
+         mathematics() + kType + kTables + kPictures + kScripted + kPhone + kPrint + ticking(page) +
          paper_footer(page);
 }
 

@@ -57,19 +57,19 @@ Markup verdicts(const Page& page) {
 }
 
 Markup pictures(const Page& page) {
-  Markup all = section({"fits", "Data and fits",
-                        paragraph("Points are readings with one standard deviation; crosses were "
-                                  "left out. Letters stand at "
-                                  "the ends of the curves.") +
-                            tag("p", {{"class", "screen-only"}},
-                                text("Tick a hypothesis to lay it over the data; open a panel by a "
-                                     "tap, a click or Enter.")),
-                        tick_boxes(page) + figure_fits(page)});
+  Markup all =
+      section({"fits", "Data and fits",
+               paragraph("Points are readings over time, with one standard deviation; crosses were "
+                         "left out. Letters stand at the ends of the curves.") +
+                   tag("p", {{"class", "screen-only"}},
+                       text("Tick a hypothesis to lay it over the data; open a panel by a "
+                            "tap, a click or Enter.")),
+               tick_boxes(page) + figure_fits(page)});
   all += section(
       {"residuals", "Residuals",
        paragraph("Reading minus what the hypothesis shows, in standard deviations, joined in "
-                 "order of time; one stretch an experiment. Drift to one side speaks against a "
-                 "hypothesis even where the misfit is small."),
+                 "order of time and evenly spaced; one stretch an experiment. Drift to one side "
+                 "speaks against a hypothesis even where the misfit is small."),
        figure_residuals(page)});
   all += section(
       {"mechanisms", "Mechanisms",

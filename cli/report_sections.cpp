@@ -1,11 +1,10 @@
 #include "gainsay/cli/report_sections.h"
 
+#include "gainsay/cli/equations.h"
 #include "gainsay/cli/number_text.h"
 #include "gainsay/cli/verdict_words.h"
-#include "gainsay/core/balance.h"
 #include "gainsay/core/print.h"
 
-#include <algorithm>
 #include <string>
 
 namespace gainsay::cli {
@@ -14,8 +13,10 @@ namespace {
 Markup sentences_of(const Contender& contender) {
   const stats::Verdict& verdict = contender.outcome->judged.verdict;
   Markup sentences;
-  for (const std::string& sentence : verdict.sentences) sentences += paragraph(sentence);
-  if (sentences.empty()) sentences = paragraph(capitalized(verdict.reason) + ".");
+  for (const std::string& sentence : verdict.sentences)
+    sentences += paragraph(with_raised_powers(sentence));
+  if (sentences.empty())
+    sentences = paragraph(with_raised_powers(capitalized(verdict.reason)) + ".");
   return sentences;
 }
 
@@ -99,45 +100,15 @@ Markup fingerprints(const Page& page) {
   return table(numbers);
 }
 
-Markup equation(const std::string& left, const core::Expression& right) {
-  const Markup math = Markup::raw("<math displaystyle=\"true\"><mrow>" + left + "<mo>=</mo>" +
-                                  core::print_mathml(right) + "</mrow></math>");
-  return tag("div", {{"class", "equation"}}, math);
-}
+constexpr std::size_t kLongEquation = 40;  // letters of a right side that half the width can hold
 
-std::string derivative_by_time(const std::string& name) {
-  const std::string d = "<mi mathvariant=\"normal\">d</mi>";
-  return "<mfrac><mrow>" + d + "<mspace width=\"0.12em\"/>" + core::mathml_name(name) +
-         "</mrow><mrow>" + d + "<mi>t</mi></mrow></mfrac>";
-}
-
-constexpr std::size_t kLongEquation = 62;  // letters of a right side that half the width can hold
-
-std::size_t longest(const core::Hypothesis& mechanism) {
-  std::size_t most = 0;
-  const auto take = [&](const core::Expression& right) {
-    most = std::max(most, core::print_text(right).size());
-  };
-  for (const core::Expression& right : core::balance_by_name(mechanism)) take(right);
-  for (const core::Reaction& reaction : mechanism.reactions) take(core::net(reaction));
-  for (const core::Definition& definition : mechanism.definitions) take(definition.meaning);
-  return most;
-}
-
-/// Derivatives in the names of reactions, then what these stand for.
-Markup system_of_equations(const core::Hypothesis& mechanism) {
-  const std::vector<core::Expression> derivatives = core::balance_by_name(mechanism);
-  Markup all;
-  for (std::size_t i = 0; i < derivatives.size(); ++i) {
-    all += equation(derivative_by_time(mechanism.species[i].name), derivatives[i]);
+bool has_long_equations(const StateSpace& form) {
+  for (const EquationSection& each : form.sections) {
+    for (const Equation& equation : each.equations) {
+      if (core::print_text(equation.right).size() > kLongEquation) return true;
+    }
   }
-  for (const core::Reaction& reaction : mechanism.reactions) {
-    all += equation(core::mathml_name(reaction.name), core::net(reaction));
-  }
-  for (const core::Definition& definition : mechanism.definitions) {
-    all += equation(core::mathml_name(definition.name), definition.meaning);
-  }
-  return all;
+  return false;
 }
 
 std::string versions(const Judgement& judgement) {
@@ -168,16 +139,17 @@ Markup equations(const Page& page) {
   Markup all;
   bool is_long = false;
   for (const Contender& contender : page.contenders) {
-    if (contender.outcome == nullptr) continue;
-    const core::Hypothesis& mechanism = contender.hypothesis->mechanism;
-    is_long = is_long || longest(mechanism) > kLongEquation;
-    all += tag("div", {{"class", "equations " + classes(contender)}},
-               tag("h3", letter_and_name(contender)) + system_of_equations(mechanism));
+    if (contender.outcome == nullptr || contender.outcome->problem == nullptr) continue;
+    const StateSpace form =
+        state_space(page.study(), contender.outcome->hypothesis, *contender.outcome->problem);
+    is_long = is_long || has_long_equations(form);
+    all += tag("div", {{"class", "system " + classes(contender)}},
+               tag("h3", letter_and_name(contender)) + equations_html(form));
   }
   return section(
       {"equations", "Equations",
-       paragraph("The derivative of each species by time, in the rates of the reactions; then "
-                 "what these are."),
+       paragraph("The derivative of each species by time in the rates of the reactions, what "
+                 "these are, the start, and what the instruments show."),
        tag("div", {{"class", is_long ? "systems" : "systems side-by-side"}}, all)});
 }
 
