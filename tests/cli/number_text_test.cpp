@@ -46,6 +46,12 @@ TEST(NumberText, PValuesNeverReadAsZero) {
   EXPECT_EQ(p_text(0.0), "below 10⁻³⁰⁰");
 }
 
+TEST(NumberText, RaisesPowersInsideWords) {
+  EXPECT_EQ(with_raised_powers("(P = 2.7e-12) of 3e+05"),
+            "(P = 2.7\u202f·\u202f10⁻¹²) of 3\u202f·\u202f10⁵");
+  EXPECT_EQ(with_raised_powers("4exp of k2e-1x, e-3"), "4exp of k2e-1x, e-3");
+}
+
 TEST(NumberText, PercentagesHaveADecimalWhereTheyAreSmall) {
   EXPECT_EQ(percent_text(0.114), "11\u202f%");
   EXPECT_EQ(percent_text(0.034), "3.4\u202f%");

@@ -62,7 +62,7 @@ class JudgementFixture {
   const cli::Judgement& judgement() const { return judgement_; }
   cli::Judgement& judgement() { return judgement_; }
 
-  /// Whether a judgement names `words` as is in every place that a study can name something.
+  /// A judgement that has `words` in every place where a study can name something.
   static cli::Judgement named_throughout(const std::string& words) {
     JudgementFixture fixture;
     cli::Judgement judgement = fixture.three();
@@ -156,6 +156,9 @@ class JudgementFixture {
     for (const estimation::Experiment& run : judgement_.study.experiments) {
       estimation::FittedExperiment fitted;
       fitted.name = run.name;
+      for (std::size_t i = 0; i < kPoints; ++i) {
+        fitted.schedule.outputs.push_back(kEvery * static_cast<double>(i));
+      }
       for (std::size_t r = 0; r < run.series.size(); ++r) {
         estimation::FittedSeries series;
         series.readout = run.series[r].readout;
@@ -163,6 +166,7 @@ class JudgementFixture {
         for (std::size_t i = 0; i < run.series[r].points.size(); ++i) {
           estimation::Datum datum;
           datum.value = run.series[r].points[i].value;
+          datum.output = i;
           datum.point = i;
           series.data.push_back(datum);
         }
