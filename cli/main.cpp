@@ -64,24 +64,27 @@ int judge(const Invocation& given, const Console& console) {
   return run_judge(options, console);
 }
 
+int laws(const Invocation& given, const Console& console) {
+  return run_laws({.name = given.text("NAME"),
+                   .json = given.has("--json"),
+                   .markdown = given.has("--markdown")},
+                  console);
+}
+
 int run(const Invocation& given, const Console& console) {
-  if (given.command == "check")
-    if (given.command == "check") {
-      return run_check({.study = study_of(given), .json = given.has("--json")}, console);
-    }
-  if (given.command == "laws") {
-    return run_laws({.name = given.text("NAME"), .json = given.has("--json")}, console);
+  if (given.command == "check") {
+    return run_check({.study = study_of(given), .json = given.has("--json")}, console);
   }
-  if (given.command == "new")
-    return run_new({.folder = given.text("FOLDER").value_or("")}, console);
   if (given.command == "equations") return equations(given, console);
   if (given.command == "simulate") return simulate(given, console);
   if (given.command == "judge") return judge(given, console);
-  if (given.command == "laws")
-    if (given.command == "new")
-      console.out << (given.command == "manual"
-                          ? manual_page()
-                          : completion_script(given.text("SHELL").value_or("bash")));
+  if (given.command == "laws") return laws(given, console);
+  if (given.command == "new") {
+    return run_new({.folder = given.text("FOLDER").value_or("")}, console);
+  }
+  console.out << (given.command == "manual"
+                      ? manual_page()
+                      : completion_script(given.text("SHELL").value_or("bash")));
   return kDone;
 }
 
@@ -101,8 +104,8 @@ int run(const std::vector<std::string>& arguments, const Console& console) {
 
 int main(int count, char** words) {
   using namespace gainsay::cli;
-  std::signal(SIGPIPE,
-              SIG_IGN);  // a closed pipe shows as a failed stream and ends quietly
+  // A closed pipe shows as a failed stream and ends quietly.
+  std::signal(SIGPIPE, SIG_IGN);
   const char* no_colour = std::getenv("NO_COLOR");
   const bool wants_colour = no_colour == nullptr || *no_colour == '\0';
   const bool messages_are_terminal = isatty(STDERR_FILENO) == 1;

@@ -74,8 +74,7 @@ struct ReferenceParts {
                                         static_cast<sunindextype>(motion.program->states()),
                                         context))),
         linear_solver(require_memory(SUNLinSol_Dense(y.get(), M.get(), context))) {
-    std::copy(motion.absolute.begin(), motion.absolute.end(),
-              NV_DATA_S(absolute.get()));
+    std::copy(motion.absolute.begin(), motion.absolute.end(), NV_DATA_S(absolute.get()));
     for (std::size_t j = 1; j < columns; ++j) {
       owned.emplace_back(require_memory(N_VClone(y.get())));
       N_VConst(0.0, owned.back().get());

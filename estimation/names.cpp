@@ -27,6 +27,7 @@ std::string quoted(std::string_view name) { return "'" + std::string(name) + "'"
 }  // namespace
 
 std::string particular(std::string_view name, std::string_view experiment) {
+  if (experiment.empty()) return std::string(name);
   return std::string(name) + "[" + std::string(experiment) + "]";
 }
 

@@ -13,7 +13,8 @@
 
 namespace gainsay::estimation {
 
-/// `name[experiment]`: how an unknown of one experiment is shown.
+/// `name[experiment]`: how an unknown of one experiment is shown; `name` where the experiment has
+/// no name (conditions made up to simulate).
 std::string particular(std::string_view name, std::string_view experiment);
 
 /// What the names of a hypothesis mean in one experiment: knowns become numbers, unknowns of one

@@ -42,7 +42,7 @@ TEST(EquationsHtml, IsMathMLThatIsWellFormed) {
 
 TEST(EquationsHtml, StandsUnderAPolicyWithoutStylesOfItsOwn) {
   const std::string html = equations_html(fed_batch_form()).str();
-  EXPECT_THAT(html, Not(HasSubstr("style=")));
+  EXPECT_THAT(html, Not(HasSubstr(" style=")));
   EXPECT_THAT(html, Not(HasSubstr("<style")));
   EXPECT_THAT(html, Not(HasSubstr("<mtable"))) << "lines are aligned by width: engines differ";
 }

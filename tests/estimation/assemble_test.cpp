@@ -128,11 +128,10 @@ TEST_F(AssembleTest, UnknownSdsAreGroupedByReadout) {
 
 TEST_F(AssembleTest, ReadoutsMayShareOneUnknownSd) {
   for (auto& readout : readouts_)
-    readout.noise = Noise{.sd = {}, .relative = {}, .sd_unknown = true};
-  readouts_[0].noise.same_as = "rate";
+    readout.noise = Noise{.sd = {}, .relative = {}, .sd_unknown = true, .same_as = {}};
+  readouts_[2].noise.same_as = "glow";
   const Problem problem = assembled();
-  EXPECT_THAT(problem.noise_groups, ElementsAre("rate"));
-  EXPECT_EQ(problem.experiments[0].series[0].noise_group, 0U);
+  EXPECT_THAT(problem.noise_groups, ElementsAre("glow"));
   EXPECT_EQ(problem.experiments[0].series[1].noise_group, 0U);
 }
 

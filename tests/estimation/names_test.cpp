@@ -53,6 +53,11 @@ TEST_F(NamesTest, UnknownsOfOneExperimentCarryItsName) {
             (std::set<std::string, std::less<>>{"A", "kd[run-03]"}));
 }
 
+TEST(Particular, ConditionsWithoutANameAddNothing) {
+  EXPECT_EQ(particular("kd", "run-03"), "kd[run-03]");
+  EXPECT_EQ(particular("kd", ""), "kd");
+}
+
 TEST_F(NamesTest, InputsThatNeverChangeAreNumbers) {
   EXPECT_EQ(resolved("T * A"), "25 * A");
   EXPECT_EQ(resolved("feed * A + t"), "feed * A + t");
@@ -60,7 +65,7 @@ TEST_F(NamesTest, InputsThatNeverChangeAreNumbers) {
 
 TEST_F(NamesTest, AtATimeInputsHaveValues) {
   EXPECT_EQ(at(0, "k * feed"), "k");
-  EXPECT_EQ(at(30, "k * feed * T"), "k * 4 * 25");
+  EXPECT_EQ(at(30, "k * feed * T"), "100 * k");
   EXPECT_EQ(at(30, "k + t"), "k + 30");
 }
 

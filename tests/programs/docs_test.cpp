@@ -110,6 +110,7 @@ class PageReader {
 };
 
 void copy_studies(const fs::path& folder) {
+  fs::create_directories(folder / "docs");
   fs::copy(kRoot / "data", folder / "data", fs::copy_options::recursive);
   for (const auto& study : fs::directory_iterator(folder / "data"))
     fs::remove_all(study.path() / "results");
