@@ -1,3 +1,4 @@
+cmake_minimum_required(VERSION 3.25)
 # Every source of a layer has a test of its name: core/parse.cpp, tests/core/parse_test.cpp. Sources that are tested only
 # through others stand in unmirrored.txt; that list may shrink, and a line that is no longer true is an offence as well.
 file(GLOB sources RELATIVE ${ROOT} ${ROOT}/core/*.cpp ${ROOT}/estimation/*.cpp ${ROOT}/stats/*.cpp
