@@ -52,9 +52,10 @@ TEST(Published, SilverDecaysAsTwoIsotopes) {
                          {"life_long", "209.7"}});
 }
 
-// Nobody states the noise of the yields (COPS 3.0; Dolan, More & Munson 2004).
+// COPS 3.0 (Dolan, More & Munson 2004).
 TEST(Published, GasOilIsJudgedByOrderAlone) {
   const json cracking = hypothesis(judged("gas-oil-cracking"), "A");
+  expect_sum_of_squares(cracking, "5.2366e-3");
   EXPECT_EQ(cracking.at("tests").at("decides"), "order");
   EXPECT_TRUE(cracking.at("tests").at("noise_unknown").get<bool>());
 }
