@@ -1,5 +1,6 @@
 #include "gainsay/cli/study_reader.h"
 
+#include "gainsay/testing/broken_studies.h"
 #include "gainsay/testing/study_folder.h"
 
 #include <gtest/gtest.h>
@@ -47,6 +48,35 @@ TEST(StudyReader, EveryFileReadIsKept) {
   ASSERT_EQ(reading.texts.size(), 4U);
   EXPECT_EQ(reading.texts.at("experiments/run.csv"), StudyFolder::kTable);
 }
+
+TEST(StudyReader, AFolderThatHoldsNoStudyIsSaid) {
+  const testing::ScratchFolder folder;
+  const StudyReading reading = read_study(folder.path() / "nowhere");
+  EXPECT_FALSE(reading.study.has_value());
+  ASSERT_EQ(reading.diagnostics.size(), 1U);
+  EXPECT_EQ(reading.diagnostics[0].file, "study.toml");
+  EXPECT_NE(reading.diagnostics[0].what.find("holds no study"), std::string::npos);
+}
+
+TEST(StudyReader, WithoutATitleAStudyIsCalledByItsFolder) {
+  StudyFolder folder;
+  folder.write("study.toml", std::string(StudyFolder::kStudy).substr(24));
+  const StudyReading reading = folder.read();
+  ASSERT_TRUE(reading.study.has_value()) << folder.messages();
+  EXPECT_EQ(reading.study->title, folder.path().filename().string());
+}
+
+class BrokenStudies : public ::testing::TestWithParam<testing::BrokenStudy> {};
+
+TEST_P(BrokenStudies, SayWhatIsWrong) {
+  StudyFolder folder;
+  write(GetParam(), folder);
+  EXPECT_FALSE(folder.read().study.has_value());
+  EXPECT_EQ(folder.messages(), GetParam().says);
+}
+
+INSTANTIATE_TEST_SUITE_P(StudyReader, BrokenStudies, ::testing::ValuesIn(testing::broken_studies()),
+                         [](const auto& tested) { return tested.param.name; });
 
 }  // namespace
 }  // namespace gainsay::cli
