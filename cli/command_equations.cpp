@@ -4,9 +4,7 @@
 #include "gainsay/cli/find.h"
 #include "gainsay/cli/judging.h"
 #include "gainsay/cli/study_reader.h"
-#include "gainsay/estimation/draft.h"
 
-#include <algorithm>
 #include <cstddef>
 #include <vector>
 
@@ -28,13 +26,11 @@ Result<std::vector<std::size_t>> chosen(const EquationsOptions& options, const S
   return numbers;
 }
 
-/// With its data; where there are none yet, as for simulating.
+/// As for simulating: with every readout, whether there are data of it yet or not.
 Result<estimation::Problem> put_together(const Study& study, std::size_t number) {
-  const auto& experiments = study.experiments;
-  if (std::any_of(experiments.begin(), experiments.end(), estimation::has_data))
-    return assemble_problem(study, number, Purpose::Judge);
+  if (!study.experiments.empty()) return assemble_problem(study, number, Purpose::Simulate);
   Study planned = study;
-  if (planned.experiments.empty()) planned.experiments.emplace_back();
+  planned.experiments.emplace_back();
   return assemble_problem(planned, number, Purpose::Simulate);
 }
 

@@ -38,7 +38,7 @@ class Drafting {
     if (auto trouble = take_doses()) return *trouble;
     if (auto trouble = take_readouts(all_readouts)) return *trouble;
     for (const auto& series : experiment_.series)
-      if (auto trouble = take_data(series)) return *trouble;
+      if (auto trouble = take_data(series, !all_readouts)) return *trouble;
     list_inputs();
     return std::move(draft_);
   }
@@ -135,7 +135,7 @@ class Drafting {
     });
   }
 
-  Trouble take_data(const Series& series) {
+  Trouble take_data(const Series& series, bool needs_sd) {
     FittedSeries fitted;
     fitted.readout = series.readout;
     const auto shown = std::find_if(draft_.shown.begin(), draft_.shown.end(), [&](std::size_t i) {
@@ -154,7 +154,7 @@ class Drafting {
     for (std::size_t i = 0; i < series.points.size(); ++i) {
       const Point& point = series.points[i];
       if (!is_fitted(point)) continue;
-      if (auto trouble = require_usable(point, readout)) return trouble;
+      if (auto trouble = require_usable(point, readout, needs_sd)) return trouble;
       fitted.data.push_back({0, in_program, point.value, resolved_sd(point, readout.noise), i});
       draft_.times.push_back(point.time);
     }
@@ -164,14 +164,14 @@ class Drafting {
     return std::nullopt;
   }
 
-  Trouble require_usable(const Point& point, const Readout& readout) const {
+  Trouble require_usable(const Point& point, const Readout& readout, bool needs_sd) const {
     if (point.time < experiment_.begins)
       return names_.failure("a reading of '" + readout.name + "' comes before the beginning",
                             "readings at or after the beginning of the experiment",
                             "leave it out, or let the experiment begin earlier");
     const bool noise_is_zero = !readout.noise.sd_unknown && readout.noise.sd.value_or(0.0) == 0.0 &&
                                readout.noise.relative.value_or(0.0) == 0.0;
-    if (std::isnan(point.sd) ? noise_is_zero : point.sd <= 0.0)
+    if (needs_sd && (std::isnan(point.sd) ? noise_is_zero : point.sd <= 0.0))
       return names_.failure("a reading of '" + readout.name + "' has no sd",
                             "an sd above 0 beside each reading, or 'noise' for the readout",
                             "add 'noise = { sd = ... }' to the readout, or a column 'sd " +

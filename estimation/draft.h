@@ -45,7 +45,8 @@ struct Draft {
 /// Whether any point of the experiment is fitted.
 bool has_data(const Experiment& experiment);
 
-/// Fails as `assemble` does. With `all_readouts` the system shows every readout in its order.
+/// Fails as `assemble` does. With `all_readouts`, for simulating, the system shows every readout in
+/// its order, and readings need no sd.
 core::Result<Draft> draft(const Ground& ground, const Experiment& experiment, bool all_readouts);
 
 }  // namespace gainsay::estimation

@@ -164,6 +164,8 @@ TEST_F(DraftTest, AReadingWithoutAnySdIsAskedAbout) {
               HasSubstr("a reading of 'plasma' has no sd"));
   readouts_[0].noise.sd = 0.0;
   EXPECT_THAT(bad(Bench("low").data("plasma", {{1, 2}})), HasSubstr("has no sd"));
+  EXPECT_EQ(good(Bench("low").data("plasma", {{1, 2}}), true).series.size(), 1U)
+      << "to simulate none is needed";
 }
 
 }  // namespace
