@@ -13,20 +13,20 @@ namespace {
 
 using testing::StudyFolder;
 
-struct Run {
+struct Ran {
   int status = -1;
   std::string out;
   std::string messages;
 };
 
-Run check(const StudyFolder& folder, bool json = false) {
+Ran check(const StudyFolder& folder, bool json = false) {
   std::ostringstream out, messages;
   const int status = run_check({folder.path(), json}, {out, messages});
   return {status, out.str(), messages.str()};
 }
 
 TEST(CommandCheck, ASoundStudyIsSummedUp) {
-  const Run run = check(StudyFolder());
+  const Ran run = check(StudyFolder());
   EXPECT_EQ(run.status, kDone);
   EXPECT_NE(run.out.find("A  Loss  (hypotheses/loss.toml)\n"), std::string::npos) << run.out;
   EXPECT_NE(run.out.find("counts       2 readings against 1 unknown\n"), std::string::npos)
@@ -35,7 +35,7 @@ TEST(CommandCheck, ASoundStudyIsSummedUp) {
 }
 
 TEST(CommandCheck, AWrongStudyEndsWithTwoAndPrintsNoResult) {
-  const Run run = check({{"experiments/run.csv", "time,glow\n1,x\n"}});
+  const Ran run = check({{"experiments/run.csv", "time,glow\n1,x\n"}});
   EXPECT_EQ(run.status, kWrongInput);
   EXPECT_EQ(run.out, "");
   EXPECT_NE(run.messages.find("experiments/run.csv:2:3: error:"), std::string::npos)
@@ -43,7 +43,7 @@ TEST(CommandCheck, AWrongStudyEndsWithTwoAndPrintsNoResult) {
 }
 
 TEST(CommandCheck, WhatJudgingNeedsIsAsked) {
-  const Run run = check({{"experiments/run.csv", "time,glow,sd glow\n1,7,0.1\n"}});
+  const Ran run = check({{"experiments/run.csv", "time,glow,sd glow\n1,7,0.1\n"}});
   EXPECT_EQ(run.status, kDone);
   EXPECT_NE(run.messages.find("warning: what the sds of 'glow' belong to is not said"),
             std::string::npos)
@@ -53,7 +53,7 @@ TEST(CommandCheck, WhatJudgingNeedsIsAsked) {
 }
 
 TEST(CommandCheck, WarningsOfMechanismsComeWithTheOthers) {
-  const Run run = check({{"hypotheses/same.toml", "base = 'loss.toml'\ntitle = 'Same'\n"}});
+  const Ran run = check({{"hypotheses/same.toml", "base = 'loss.toml'\ntitle = 'Same'\n"}});
   EXPECT_EQ(run.status, kDone);
   EXPECT_NE(run.messages.find("'Same' is the same system as 'Loss'"), std::string::npos);
 }
@@ -73,7 +73,7 @@ TEST(CommandCheck, JsonHoldsTheSameFacts) {
 }
 
 TEST(CommandCheck, JsonOfAWrongStudyHoldsItsErrors) {
-  const Run run = check({{"experiments/run.csv", "time,glow\n1,\xFF\n"}}, true);
+  const Ran run = check({{"experiments/run.csv", "time,glow\n1,\xFF\n"}}, true);
   EXPECT_EQ(run.status, kWrongInput);
   const auto json = nlohmann::json::parse(run.out);
   EXPECT_EQ(json["errors"][0]["file"], "experiments/run.csv");

@@ -12,13 +12,13 @@
 namespace gainsay::cli {
 namespace {
 
-struct Run {
+struct Ran {
   int status = -1;
   std::string out;
   std::string messages;
 };
 
-Run make(const std::filesystem::path& folder) {
+Ran make(const std::filesystem::path& folder) {
   std::ostringstream out, messages;
   const int status = run_new({folder}, {out, messages});
   return {status, out.str(), messages.str()};
@@ -26,7 +26,7 @@ Run make(const std::filesystem::path& folder) {
 
 TEST(CommandNew, AFolderThatIsNotThereIsMade) {
   const testing::ScratchFolder scratch;
-  const Run run = make(scratch.path() / "deep/study");
+  const Ran run = make(scratch.path() / "deep/study");
   EXPECT_EQ(run.status, kDone) << run.messages;
   EXPECT_NE(run.out.find("next: gainsay judge "), std::string::npos);
   EXPECT_TRUE(read_study(scratch.path() / "deep/study").study.has_value());
@@ -40,7 +40,7 @@ TEST(CommandNew, AnEmptyFolderIsUsed) {
 TEST(CommandNew, AFolderInUseIsLeftAlone) {
   const testing::ScratchFolder scratch;
   scratch.write("mine.txt", "keep");
-  const Run run = make(scratch.path());
+  const Ran run = make(scratch.path());
   EXPECT_EQ(run.status, kWrongInput);
   EXPECT_EQ(run.out, "");
   EXPECT_NE(run.messages.find("it is not empty"), std::string::npos);
@@ -50,7 +50,7 @@ TEST(CommandNew, AFolderInUseIsLeftAlone) {
 TEST(CommandNew, AFileIsNoFolder) {
   const testing::ScratchFolder scratch;
   scratch.write("mine.txt", "keep");
-  const Run run = make(scratch.path() / "mine.txt");
+  const Ran run = make(scratch.path() / "mine.txt");
   EXPECT_EQ(run.status, kWrongInput);
   EXPECT_EQ(scratch.read("mine.txt"), "keep");
 }

@@ -12,10 +12,10 @@ namespace {
 using testing::StudyFolder;
 
 StudyFolder with_sds(const std::string& readout) {
-  StudyFolder folder{{"experiments/run.csv", "time,glow,sd glow\n1,7.2,0.1\n2,4.9,0.2\n"}};
-  folder.write("study.toml",
-               "[readouts]\nglow = { shows = 'A'" + readout + " }\n[unknowns]\nk = [0.01, 10]\n");
-  return folder;
+  const std::string study =
+      "[readouts]\nglow = { shows = 'A'" + readout + " }\n[unknowns]\nk = [0.01, 10]\n";
+  return {{"experiments/run.csv", "time,glow,sd glow\n1,7.2,0.1\n2,4.9,0.2\n"},
+          {"study.toml", study.c_str()}};
 }
 
 TEST(DataCheck, WhatSdsBelongToIsAskedByLookingAndNeededByJudging) {
